@@ -1,0 +1,26 @@
+import reactHooks from 'eslint-plugin-react-hooks';
+import tseslint from 'typescript-eslint';
+import { importRules } from './.lint/imports.js';
+
+export default tseslint.config(
+  { ignores: ['dist/', 'coverage/', 'node_modules/', '.data/', 'test-results/', 'playwright-report/'] },
+  ...tseslint.configs.recommended,
+  {
+    files: ['**/*.{ts,tsx}'],
+    rules: {
+      '@typescript-eslint/consistent-type-imports': 'error',
+      '@typescript-eslint/no-explicit-any': 'error',
+      'max-lines': ['error', { max: 400, skipBlankLines: true, skipComments: true }],
+      eqeqeq: 'error',
+    },
+  },
+  { files: ['src/**/*.{ts,tsx}'], ...reactHooks.configs.flat['recommended-latest'] },
+  {
+    files: ['shared/**/*.ts'],
+    rules: {
+      'no-restricted-globals': ['error', 'Date', 'process', 'window', 'document', 'fetch', 'setTimeout'],
+      'no-restricted-properties': ['error', { object: 'Math', property: 'random', message: 'Seeds come in as arguments.' }],
+    },
+  },
+  ...importRules,
+);

@@ -1,0 +1,29 @@
+import canonicalize from 'canonicalize';
+import { z } from 'zod';
+import { id } from '../api/endpoint.ts';
+import { Frame, LayoutPattern, LayoutSheet } from '../layouts/layout.ts';
+import { Obstruction, Stud, WallShape, Zone } from '../walls/wall.ts';
+
+/** All that a client agrees to, whole in itself: later changes of wall, pattern or shop do not reach it. */
+export const Snapshot = z.object({
+  format: z.literal(1),
+  shop: z.string(),
+  job: z.string(),
+  client: z.string(),
+  letter: z.string(),
+  note: z.string(),
+  layoutId: id,
+  sheet: LayoutSheet,
+  frames: z.array(Frame),
+  patterns: z.array(LayoutPattern),
+  wall: WallShape.extend({ studs: z.array(Stud), obstructions: z.array(Obstruction), zones: z.array(Zone) }),
+  /** The photo behind it, by the hash of its bytes, and the wall rectangle it shows. */
+  elevation: z.object({ photoId: id, sha256: z.string(), leftMm: z.number(), bottomMm: z.number(), widthMm: z.number(), heightMm: z.number() }).nullable(),
+});
+export type Snapshot = z.infer<typeof Snapshot>;
+
+/** The one text of a snapshot that is hashed: JSON in canonical form (RFC 8785), frames and patterns by id. */
+export function canonicalText(snapshot: Snapshot): string {
+  const byId = <T extends { id: string }>(list: T[]) => [...list].sort((a, b) => (a.id < b.id ? -1 : 1));
+  return canonicalize({ ...snapshot, frames: byId(snapshot.frames), patterns: byId(snapshot.patterns) }) ?? '';
+}

@@ -1,0 +1,30 @@
+import { z } from 'zod';
+import { bytes, endpoint, id } from '../api/endpoint.ts';
+import { Mark, Photo, Stud, Wall, WallShape } from './wall.ts';
+
+const inWall = z.object({ wallId: id });
+const inPhoto = z.object({ wallId: id, photoId: id });
+
+export const wallsApi = {
+  list: endpoint({ method: 'get', path: '/api/jobs/:jobId/walls', permission: 'read jobs', summary: 'The walls of a job.', params: z.object({ jobId: id }), reply: z.array(Wall) }),
+  create: endpoint({ method: 'post', path: '/api/jobs/:jobId/walls', permission: 'change jobs', status: 201, summary: 'Add a wall to a job.', params: z.object({ jobId: id }), body: WallShape, reply: Wall }),
+  read: endpoint({ method: 'get', path: '/api/walls/:wallId', permission: 'read jobs', summary: 'One wall.', params: inWall, reply: Wall }),
+  change: endpoint({
+    method: 'patch', path: '/api/walls/:wallId', permission: 'change jobs', summary: 'Change size, construction or studs of a wall.',
+    params: inWall,
+    body: WallShape.partial().extend({ version: z.number().int(), studs: z.array(Stud).max(200).optional() }),
+    reply: Wall,
+  }),
+  upload: endpoint({
+    method: 'post', path: '/api/walls/:wallId/photos', permission: 'change jobs', kind: 'upload', status: 201, limit: 'heavy',
+    summary: 'Upload a photo of the wall (JPEG, PNG or WebP; up to 40 MB and 60 megapixels).', params: inWall, reply: Photo,
+  }),
+  straighten: endpoint({
+    method: 'post', path: '/api/walls/:wallId/photos/:photoId/straighten', permission: 'change jobs', limit: 'heavy',
+    summary: 'Straighten the photo from four marks of known position.', params: inPhoto,
+    body: z.object({ marks: z.array(Mark).length(4, 'Mark four points.') }), reply: Photo,
+  }),
+  removePhoto: endpoint({ method: 'delete', path: '/api/walls/:wallId/photos/:photoId', permission: 'change jobs', summary: 'Take the photo off the wall and delete it.', params: inPhoto, reply: Wall }),
+  preview: endpoint({ method: 'get', path: '/api/walls/:wallId/photos/:photoId/preview', permission: 'read jobs', kind: 'file', summary: 'The upright photo, at most 2048 px, without metadata.', params: inPhoto, reply: bytes }),
+  elevation: endpoint({ method: 'get', path: '/api/walls/:wallId/photos/:photoId/elevation', permission: 'read jobs', kind: 'file', summary: 'The straightened elevation.', params: inPhoto, reply: bytes }),
+};
