@@ -18,8 +18,13 @@ export default tseslint.config(
   {
     files: ['shared/**/*.ts'],
     rules: {
-      'no-restricted-globals': ['error', 'Date', 'process', 'window', 'document', 'fetch', 'setTimeout'],
-      'no-restricted-properties': ['error', { object: 'Math', property: 'random', message: 'Seeds come in as arguments.' }],
+      'no-restricted-globals': ['error', 'process', 'window', 'document', 'fetch', 'setTimeout'],
+      'no-restricted-properties': [
+        'error',
+        { object: 'Math', property: 'random', message: 'Seeds come in as arguments.' },
+        { object: 'Date', property: 'now', message: 'Times come in as arguments.' },
+      ],
+      'no-restricted-syntax': ['error', { selector: "NewExpression[callee.name='Date'][arguments.length=0]", message: 'Times come in as arguments.' }],
     },
   },
   ...importRules,

@@ -22,8 +22,23 @@ export const Snapshot = z.object({
 });
 export type Snapshot = z.infer<typeof Snapshot>;
 
-/** The one text of a snapshot that is hashed: JSON in canonical form (RFC 8785), frames and patterns by id. */
+type Content = Pick<Snapshot, 'layoutId' | 'sheet' | 'frames' | 'patterns' | 'wall' | 'elevation'>;
+
+const inOrder = <T extends { id: string }>(list: readonly T[]) => [...list].sort((a, b) => (a.id < b.id ? -1 : a.id > b.id ? 1 : 0));
+
+const ordered = <C extends Content>(content: C): C => ({
+  ...content,
+  frames: inOrder(content.frames),
+  patterns: inOrder(content.patterns),
+  wall: { ...content.wall, studs: inOrder(content.wall.studs), obstructions: inOrder(content.wall.obstructions), zones: inOrder(content.wall.zones) },
+});
+
+/** The one text of a snapshot that is hashed: JSON in canonical form (RFC 8785), lists ordered by id. */
 export function canonicalText(snapshot: Snapshot): string {
-  const byId = <T extends { id: string }>(list: T[]) => [...list].sort((a, b) => (a.id < b.id ? -1 : 1));
-  return canonicalize({ ...snapshot, frames: byId(snapshot.frames), patterns: byId(snapshot.patterns) }) ?? '';
+  return canonicalize(ordered(snapshot)) ?? '';
+}
+
+/** The same for the content alone, to tell whether a layout has changed since it was sent. */
+export function contentText({ layoutId, sheet, frames, patterns, wall, elevation }: Content): string {
+  return canonicalize(ordered({ layoutId, sheet, frames, patterns, wall, elevation })) ?? '';
 }

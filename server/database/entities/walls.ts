@@ -1,0 +1,58 @@
+import { Entity, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
+import type { Mark, Obstruction, Photo, Stud, WallShape, Zone } from '../../../shared/walls/wall.ts';
+import { Instant, Json, Mm, Ref, Text, Whole } from './columns.ts';
+import { JobRow } from './jobs.ts';
+
+@Entity('walls')
+export class WallRow {
+  @PrimaryColumn({ type: 'uuid' }) id: string;
+  @Ref() shopId: string;
+  @Ref() jobId: string;
+  @ManyToOne(() => JobRow, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'jobId', foreignKeyConstraintName: 'fk_walls_job' })
+  job?: JobRow;
+  @Text(80) name: string;
+  @Mm() widthMm: number;
+  @Mm() heightMm: number;
+  @Text(20) construction: WallShape['construction'];
+  @Mm() coveringMm: number;
+  @Json() obstructions: Obstruction[];
+  @Json() zones: Zone[];
+  /** The photo in force. No foreign key: photos point at walls, and a circle of keys cannot be filled. */
+  @Ref({ nullable: true }) photoId: string | null;
+  @Whole() version: number;
+  @Instant() createdAt: Date;
+}
+
+@Entity('studs')
+export class StudRow {
+  @PrimaryColumn({ type: 'uuid' }) id: string;
+  @Ref() wallId: string;
+  @ManyToOne(() => WallRow, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'wallId', foreignKeyConstraintName: 'fk_studs_wall' })
+  wall?: WallRow;
+  @Mm() xMm: number;
+  @Mm() widthMm: number;
+  @Text(10) foundBy: Stud['foundBy'];
+  @Mm() uncertaintyMm: number;
+}
+
+@Entity('photos')
+export class PhotoRow {
+  @PrimaryColumn({ type: 'uuid' }) id: string;
+  @Ref() shopId: string;
+  @Ref() wallId: string;
+  @ManyToOne(() => WallRow, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'wallId', foreignKeyConstraintName: 'fk_photos_wall' })
+  wall?: WallRow;
+  /** Keys in the file store. */
+  @Text(200) originalKey: string;
+  @Text(200) previewKey: string;
+  @Text(200, { nullable: true }) elevationKey: string | null;
+  @Text(64, { nullable: true }) elevationSha256: string | null;
+  @Whole() widthPx: number;
+  @Whole() heightPx: number;
+  @Json({ nullable: true }) marks: Mark[] | null;
+  @Json({ nullable: true }) elevation: Omit<NonNullable<Photo['elevation']>, 'url'> | null;
+  @Instant() createdAt: Date;
+}
