@@ -1,26 +1,17 @@
 import { z } from 'zod';
 import { id } from '../api/endpoint.ts';
+import { speciesIds } from '../hardware/timber.ts';
+import { membersOf } from './members.ts';
+import { outlineOf, ShapeError } from './outline.ts';
+import { Shape } from './shape.ts';
 
-const sideMm = z.number({ error: 'Please give a length.' }).finite().min(20, 'A side is at least 20 mm long.').max(3000, 'A side is at most 3 m long.');
-const angleRad = z.number().finite().gt(0).lt(Math.PI);
-
-/** The outline of a frame: its outer faces, as a convex polygon. */
-export const Shape = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('regular'), sides: z.number().int('Whole sides only.').min(3, 'A frame has at least 3 sides.').max(12, 'A frame has at most 12 sides.'), sideMm }),
-  z.object({ kind: z.literal('stretched hexagon'), sideMm, stretchMm: sideMm }),
-  z.object({ kind: z.literal('half hexagon'), sideMm }),
-  z.object({ kind: z.literal('rhombus'), sideMm, angleRad }),
-  z.object({ kind: z.literal('kite'), upperMm: sideMm, lowerMm: sideMm, widthMm: sideMm }),
-  z.object({ kind: z.literal('trapezoid'), baseMm: sideMm, topMm: sideMm, heightMm: sideMm }),
-  z.object({ kind: z.literal('rectangle'), widthMm: sideMm, heightMm: sideMm }),
-  z.object({ kind: z.literal('triangle'), aMm: sideMm, bMm: sideMm, cMm: sideMm }),
-  z.object({ kind: z.literal('free'), verticesMm: z.array(z.tuple([z.number().finite(), z.number().finite()])).min(3, 'A frame has at least 3 sides.').max(12, 'A frame has at most 12 sides.') }),
-]);
-export type Shape = z.infer<typeof Shape>;
-
-export const speciesIds = ['white ash', 'beech', 'yellow birch', 'cherry', 'hard maple', 'red maple', 'red oak', 'white oak', 'walnut', 'yellow-poplar'] as const;
+export { Shape } from './shape.ts';
+export { speciesIds };
 export const Species = z.enum(speciesIds, { error: 'This species is not in the timber table.' });
 export type Species = z.infer<typeof Species>;
+
+/** A finite number that says its own name when it is none. */
+const measure = (name: string) => z.number({ error: `${name} must be a number.` });
 
 /** One hanger of a frame: where its wall screw meets the wall, told along a member. */
 export const Hanger = z.object({
@@ -28,11 +19,14 @@ export const Hanger = z.object({
   /** Member by number, 0 first, counter-clockwise from the pattern's lowest side. */
   member: z.number().int().min(0).max(11),
   /** Along the member from the middle of its outer side, mm, counter-clockwise positive. */
-  alongMm: z.number().finite().min(-3000).max(3000),
+  alongMm: measure('The place along the member').min(-3000).max(3000),
   /** In from the outer face, square to it, mm. */
-  insetMm: z.number().finite().min(0).max(500),
+  insetMm: measure('The inset from the outer face').min(0, 'The inset cannot be less than zero.').max(500),
   /** How far it may slide along the member either way, mm: [lowest, highest] offset. */
-  allowanceMm: z.tuple([z.number().finite().max(0), z.number().finite().min(0)]),
+  allowanceMm: z.tuple([
+    measure('The lower allowance').max(0, 'The lower allowance is zero or less.'),
+    measure('The upper allowance').min(0, 'The upper allowance is zero or more.'),
+  ]),
   bracketId: id.nullable(),
   wallScrewId: id.nullable(),
 });
@@ -40,30 +34,78 @@ export type Hanger = z.infer<typeof Hanger>;
 
 export const Groove = z.object({
   /** From the inner face outwards, mm. */
-  widthMm: z.number().finite().positive().max(100),
+  widthMm: measure('The width of the groove').positive('The width of the groove must be more than zero.').max(100),
   /** From the back edge, mm. */
-  depthMm: z.number().finite().positive().max(100),
+  depthMm: measure('The depth of the groove').positive('The depth of the groove must be more than zero.').max(100),
   /** Play left all round the panel, mm. */
-  clearanceMm: z.number().finite().min(0).max(10),
-  mirrorMm: z.number().finite().min(0).max(20),
-  backerMm: z.number().finite().min(0).max(30),
+  clearanceMm: measure('The clearance').min(0, 'The clearance cannot be less than zero.').max(10, 'The clearance is at most 10 mm.'),
+  mirrorMm: measure('The thickness of the mirror').min(0, 'A mirror cannot be thinner than nothing.').max(20),
+  backerMm: measure('The thickness of the backer').min(0, 'A backer cannot be thinner than nothing.').max(30),
 });
 export type Groove = z.infer<typeof Groove>;
 
-/** A frame design, as the pattern book keeps it and a signed revision freezes it. */
-export const PatternDesign = z.object({
+const designFields = z.object({
   shape: Shape,
-  thicknessMm: z.number().finite().min(3, 'Members are at least 3 mm thick.').max(100, 'Members are at most 100 mm thick.'),
+  thicknessMm: measure('The thickness of the members').min(3, 'Members are at least 3 mm thick.').max(100, 'Members are at most 100 mm thick.'),
   /** Off the wall, mm. */
-  depthMm: z.number().finite().min(10, 'A frame is at least 10 mm deep.').max(600, 'A frame is at most 600 mm deep.'),
+  depthMm: measure('The depth').min(10, 'A frame is at least 10 mm deep.').max(600, 'A frame is at most 600 mm deep.'),
   species: Species,
-  moisturePercent: z.number().min(4).max(25).default(8),
+  moisturePercent: measure('The moisture content').min(4, 'Wood indoors holds at least 4 % of water.').max(25, 'Wood above 25 % is too wet to work.').default(8),
   groove: Groove.nullable().default(null),
   hangers: z.array(Hanger).max(12),
   /** What a frame of this pattern is to carry, kg; null takes the default rule. */
-  contentsKg: z.number().finite().min(0).max(500).nullable().default(null),
+  contentsKg: measure('What the frame carries').min(0, 'A frame cannot carry less than nothing.').max(500, 'No frame here carries more than 500 kg.').nullable().default(null),
+});
+
+/** A frame design, as the pattern book keeps it and a signed revision freezes it. Refuses what cannot be made a ring at all. */
+export const PatternDesign = designFields.superRefine((design, context) => {
+  for (const { path, words } of flawsOf(design)) context.addIssue({ code: 'custom', path, message: words });
 });
 export type PatternDesign = z.infer<typeof PatternDesign>;
+
+interface Flaw {
+  path: (string | number)[];
+  words: string;
+}
+
+/** What no ring of members can be made of, whatever the wood. What can be made but should not be is for the findings to say. */
+function flawsOf(design: z.infer<typeof designFields>): Flaw[] {
+  const outline = outlineOrFlaw(design.shape);
+  if (!Array.isArray(outline)) return [outline];
+  const members = membersOf(outline, design.thicknessMm);
+  const flaws: Flaw[] = [];
+  const swallowed = members.find(({ shortPointMm }) => shortPointMm <= 0);
+  if (swallowed) flaws.push({ path: ['thicknessMm'], words: `At this thickness member ${swallowed.index + 1} has no inner face left: take thinner members or longer sides.` });
+  return [...flaws, ...grooveFlaws(design), ...hangerFlaws(design.hangers, members.map(({ longPointMm }) => longPointMm))];
+}
+
+function outlineOrFlaw(shape: Shape): ReturnType<typeof outlineOf> | Flaw {
+  try {
+    return outlineOf(shape);
+  } catch (error) {
+    if (!(error instanceof ShapeError)) throw error;
+    return { path: ['shape', ...error.path], words: error.message };
+  }
+}
+
+function grooveFlaws({ groove, thicknessMm, depthMm }: Pick<z.infer<typeof designFields>, 'groove' | 'thicknessMm' | 'depthMm'>): Flaw[] {
+  if (!groove) return [];
+  const flaws: Flaw[] = [];
+  if (groove.widthMm >= thicknessMm) flaws.push({ path: ['groove', 'widthMm'], words: 'A groove as wide as the member is thick cuts it through.' });
+  if (groove.depthMm >= depthMm) flaws.push({ path: ['groove', 'depthMm'], words: 'A groove as deep as the frame cuts it through.' });
+  if (groove.clearanceMm >= groove.widthMm) flaws.push({ path: ['groove', 'clearanceMm'], words: 'A clearance as large as the groove is wide leaves the panel nothing to rest on.' });
+  return flaws;
+}
+
+function hangerFlaws(hangers: Hanger[], longPointsMm: number[]): Flaw[] {
+  return hangers.flatMap((hanger, i): Flaw[] => {
+    const length = longPointsMm[hanger.member];
+    if (hangers.findIndex((other) => other.id === hanger.id) < i) return [{ path: ['hangers', i, 'id'], words: 'Two hangers bear the same name.' }];
+    if (length === undefined) return [{ path: ['hangers', i, 'member'], words: `This frame has no member ${hanger.member + 1}.` }];
+    if (Math.abs(hanger.alongMm) > length / 2) return [{ path: ['hangers', i, 'alongMm'], words: 'This place lies beyond the end of the member.' }];
+    return [];
+  });
+}
 
 export const Pattern = z.object({ id, name: z.string(), design: PatternDesign, version: z.number().int(), archived: z.boolean() });
 export type Pattern = z.infer<typeof Pattern>;
