@@ -5,7 +5,6 @@ import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { AppServer, requirePort, serverScript } from './prepare/app-server.ts';
 import { build, isBuilt } from './prepare/build.ts';
-import { keptSecret } from './prepare/kept-secret.ts';
 import { startMariadb, type Database } from './prepare/mariadb.ts';
 import { claim, endHolder, release } from './prepare/pid-file.ts';
 import { Problem } from './prepare/problem.ts';
@@ -66,7 +65,6 @@ async function serve(port: number, database: Database | null): Promise<void> {
       PORT: String(port),
       DATA_DIR: dataDir,
       DATABASE_URL: database?.url ?? process.env.DATABASE_URL,
-      JWT_SECRET: process.env.JWT_SECRET || keptSecret(path.join(dataDir, 'session-secret')),
     },
     onEnd: (how) => end.reject(new Problem(`The server ended unexpectedly (${how}). Run npm start again: nothing that was saved is lost.`)),
   });
@@ -176,6 +174,8 @@ end.promise.catch(() => {});
 main().then(
   () => process.exit(0),
   (error: unknown) => {
+    // Asked to stop while still starting: what was cut short then is no failure.
+    if (asked && error instanceof Problem) process.exit(0);
     console.error(error instanceof Problem ? error.message : error);
     process.exit(1);
   },
