@@ -60,7 +60,7 @@ export interface Parts {
 
 /** Wires every room together; the one place that knows them all. */
 export function createApp(parts: Parts): { app: Express; mounted: Mounted[]; rooms: Rooms } {
-  const { config, data, log, clock } = parts;
+  const { config, data, log } = parts;
   const rooms = createRooms(parts);
   const cookies = sessionCookies(config.jwtSecret, config.appOrigin.startsWith('https:'));
 
@@ -132,7 +132,7 @@ function createRooms({ config, data, outbox, pool, clock, bcryptCost }: Parts) {
   const walls = wallsService({ walls: wallsRepository(data), jobs, files, pool, clock });
   const layouts = layoutsService({ layouts: layoutsRepository(data), jobs, walls, patterns, clock });
   const signoffs = signoffsService({ signoffs: signoffsRepository(data), layouts, jobs, walls, people, files, outbox, origin: config.appOrigin, clock });
-  const templates = templatesService({ layouts, jobs, walls, patterns, people, pool, clock });
+  const templates = templatesService({ layouts, jobs, people, pool, clock });
   jobs.lookAt({
     wallsOf: (job) => walls.ofJob(job.shopId, job.id),
     layoutsOf: (job) => layouts.ofJob(job.shopId, job.id),

@@ -3,9 +3,10 @@ import bcrypt from 'bcryptjs';
 import { utf8Length, type Me, type Member } from '../../shared/people/people.api.ts';
 import type { Role } from '../../shared/people/permissions.ts';
 import { ProblemError } from '../http/problems.ts';
+import { hashToken, newToken } from '../http/tokens.ts';
 import type { Who } from '../http/who.ts';
 import type { PeopleRepository, UserWithShop } from './people.repository.ts';
-import { hashToken, newToken, refreshDays } from './sessions.ts';
+import { refreshDays } from './sessions.ts';
 
 /** Two tabs may refresh at once: a token just replaced is still understood for this long. */
 const graceMs = 20_000;

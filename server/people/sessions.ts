@@ -1,4 +1,3 @@
-import { createHash, randomBytes } from 'node:crypto';
 import type { CookieOptions, Request, Response } from 'express';
 import jwt from 'jsonwebtoken';
 import { z } from 'zod';
@@ -49,6 +48,3 @@ export function sessionCookies(secret: string, secure: boolean) {
   };
 }
 export type SessionCookies = ReturnType<typeof sessionCookies>;
-
-export const newToken = () => randomBytes(32).toString('base64url');
-export const hashToken = (token: string) => createHash('sha256').update(token).digest('hex');
