@@ -6,7 +6,7 @@ import { edgeField, strongestSnap } from '../../../shared/layouts/snap.ts';
 import type { SnapAsk } from '../../../shared/layouts/snap.ts';
 import { nextStepRad, plainTurnRad, turnStepRad } from '../../../shared/layouts/turn.ts';
 
-const placed = (outline: Point[], at: Omit<Placement, 'flipped'>) => placedAll(outline, { flipped: false, ...at });
+const placed = (outline: Point[], at: Omit<Placement, 'flipped'>) => placedAll(outline, { ...at, flipped: false });
 
 /** Corners of a regular outline about its centroid, lowest side level, counter-clockwise. */
 function regular(sides: number, side: number): Point[] {
@@ -19,8 +19,8 @@ function regular(sides: number, side: number): Point[] {
 
 const rectangle = (w: number, h: number): Point[] => [{ x: -w / 2, y: -h / 2 }, { x: w / 2, y: -h / 2 }, { x: w / 2, y: h / 2 }, { x: -w / 2, y: h / 2 }];
 const side = (outline: Point[], i: number) => [outline[i]!, outline[(i + 1) % outline.length]!] as const;
-const ask = (over: Partial<SnapAsk> & { outline: Point[]; placement: Omit<Placement, 'flipped'> }): SnapAsk => ({
-  revealMm: 3, reachMm: 40, maxTurnRad: 0.35, ...over, placement: { flipped: false, ...over.placement },
+const ask = (over: Partial<Omit<SnapAsk, 'placement'>> & { outline: Point[]; placement: Omit<Placement, 'flipped'> }): SnapAsk => ({
+  revealMm: 3, reachMm: 40, maxTurnRad: 0.35, ...over, placement: { ...over.placement, flipped: false },
 });
 
 const anOutline = fc.oneof(
