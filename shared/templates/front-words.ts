@@ -1,0 +1,60 @@
+import { formatLength } from '../units/length.ts';
+import type { Datums, longestSpan } from './hang-order.ts';
+import { signature } from './sheet-title.ts';
+import type { TemplateInput } from './template-input.ts';
+
+export interface Words {
+  heading: string;
+  paragraphs: string[];
+  numbered: boolean;
+  warns?: boolean;
+}
+
+/** A bar more than 0.2 % off makes 2 mm in a metre: common practice for paper templates. */
+export function proveScale(units: 'in' | 'mm', span: ReturnType<typeof longestSpan>): Words {
+  const limit = units === 'mm' ? '0.3 mm in 150 mm' : '1/64" in 8"';
+  return {
+    heading: 'Prove the scale first',
+    numbered: true,
+    paragraphs: [
+      'Print at 100 %, or “actual size”. Switch off fit-to-page, shrinking and borderless printing.',
+      `Lay a steel rule on both bars of this page, and of one sheet from the middle of the pile. A bar more than 0.2 % off (${limit}) means: do not use the print.`,
+      'Then write here what you measured: across ____________ up ____________ and enter both where the template is made; the next print is corrected for this printer.',
+      ...(span ? [`When all is taped, check the whole with a tape: from screw ${span.from.label} to screw ${span.to.label} must be ${formatLength(span.mm, units)} in a straight line.`] : []),
+    ],
+  };
+}
+
+export function tapeUp(datums: Datums, units: 'in' | 'mm'): Words {
+  return {
+    heading: 'Tape up and hang',
+    numbered: true,
+    paragraphs: [
+      'Cut each sheet along its left and bottom lines. Lay the cut edge on the dashed line of the sheet it names, so that ticks and outlines meet; tape. Let paper lie in the room for an hour first: it grows and shrinks with damp.',
+      `Mark the level datum ${formatLength(datums.levelMm, units)} above the floor and the plumb datum ${formatLength(datums.plumbMm, units)} from the wall’s left edge. Carry both with a level or a laser: floors and corners are seldom true.`,
+      'Tape the template to the wall on both datums. A sheet that stands alone is set by the distances on its cut edges.',
+      'Prick every cross-hair through the paper, take the paper down, and hang from the bottom up in the order of the next page.',
+    ],
+  };
+}
+
+/** What is usually said before holes are drilled in a wall; shops add what their place asks for. */
+export function cautions(input: TemplateInput): Words {
+  const open = input.wall.studs.filter((s) => !s.confirmed).length;
+  const state = signature(input.title);
+  return {
+    heading: 'Before you drill',
+    numbered: false,
+    warns: true,
+    paragraphs: [
+      ...(state.signed ? [] : [`This layout is ${state.words}. Do not drill from it until it is signed.`]),
+      ...(open > 0 ? [`${open} ${open === 1 ? 'stud is' : 'studs are'} marked “?”: not confirmed. Find both edges of each and probe before trusting a screw to it.`] : []),
+      'Cables and pipes hide behind the wall: above, below and beside switches and outlets, near corners, ceilings, taps and radiators. Confirm with a detector, and switch the circuit off before drilling near one. If in doubt, stop and ask a licensed electrician or plumber.',
+      'No deeper than the covering and the screw need. Wear eye protection; keep drilling dust down. Paint in houses built before 1978 may hold lead: follow the local rules.',
+      'Ladder: on firm ground, three points of contact, do not reach past its rails; have a second person for any frame you cannot hold in one hand.',
+      'Glass and mirrors: gloves, edges protected, two people for large ones. Never hang glass by the glass.',
+      'Screws and anchors carry what their makers state in this wall, not more. Makers’ instructions, local codes and licensed practice come before anything on this paper.',
+      'The paper places the screws. It cannot see what is in the wall.',
+    ],
+  };
+}

@@ -1,0 +1,75 @@
+import type { Point } from '../geometry/point.ts';
+import { MM_PER_INCH } from '../units/constants.ts';
+import { formatLength } from '../units/length.ts';
+
+import type { TemplateFrame, TemplateHanger, TemplateInput } from './template-input.ts';
+
+/** The level line above the floor and the plumb line from the wall's left edge that the whole template is set by, mm. */
+export interface Datums {
+  levelMm: number;
+  plumbMm: number;
+}
+
+/** Heights nearer than this count as one course of frames, mm. */
+const courseMm = 20;
+
+/** Frames in the order they are hung: from the lowest course up, each course from the left, so that no frame waits for one below it. */
+export function hangOrder(frames: TemplateFrame[]): TemplateFrame[] {
+  const placed = frames.map((frame) => ({ frame, foot: least(frame.outlineMm, 'y'), left: least(frame.outlineMm, 'x') }));
+  placed.sort((a, b) => a.foot - b.foot);
+  const courses: (typeof placed)[] = [];
+  for (const one of placed) {
+    const course = courses.at(-1);
+    if (course && one.foot - course[0]!.foot <= courseMm) course.push(one);
+    else courses.push([one]);
+  }
+  return courses.flatMap((course) => course.sort((a, b) => a.left - b.left).map((one) => one.frame));
+}
+
+function least(points: Point[], axis: 'x' | 'y'): number {
+  return Math.min(...points.map((p) => p[axis]));
+}
+
+/** Pilot hole in the shop's units: inches to the nearest 1/64, as drill bits are sold, with the millimetres beside; or mm alone. */
+export function drillText(hanger: Pick<TemplateHanger, 'drillMm'>, units: 'in' | 'mm'): string {
+  if (hanger.drillMm === null) return 'drill as screw asks';
+  const metric = formatLength(hanger.drillMm, 'mm');
+  if (units === 'mm') return `drill ${metric}`;
+  let over = Math.max(1, Math.round((hanger.drillMm / MM_PER_INCH) * 64));
+  let under = 64;
+  while (over % 2 === 0 && under > 1) {
+    over /= 2;
+    under /= 2;
+  }
+  const inches = under === 1 ? `${over}` : over < under ? `${over}/${under}` : `${Math.floor(over / under)} ${over % under}/${under}`;
+  return `drill ${inches}" (${metric})`;
+}
+
+/** The two screws farthest from each other, and their distance: one tape across the taped-up template proves the whole. */
+export function longestSpan(frames: TemplateFrame[]): { from: TemplateHanger; to: TemplateHanger; mm: number } | null {
+  const screws = frames.flatMap((f) => f.hangers);
+  let longest: { from: TemplateHanger; to: TemplateHanger; mm: number } | null = null;
+  for (const [i, from] of screws.entries()) {
+    for (const to of screws.slice(i + 1)) {
+      const mm = Math.hypot(to.x - from.x, to.y - from.y);
+      if (longest === null || mm > longest.mm) longest = { from, to, mm };
+    }
+  }
+  return longest;
+}
+
+/**
+ * Heights and distances of the two datums: round figures near the middle of the screws (or of the frames where there are none), so that the
+ * lines cross as many sheets as can be.
+ */
+export function chooseDatums(input: Pick<TemplateInput, 'frames' | 'units'>): Datums {
+  const screws: Point[] = input.frames.flatMap((f) => f.hangers);
+  const points = screws.length > 0 ? screws : input.frames.flatMap((f) => f.outlineMm);
+  if (points.length === 0) return { levelMm: 0, plumbMm: 0 };
+  const round = input.units === 'mm' ? 50 : MM_PER_INCH;
+  const middle = (axis: 'x' | 'y') => {
+    const values = points.map((p) => p[axis]);
+    return Math.round((Math.min(...values) + Math.max(...values)) / 2 / round) * round;
+  };
+  return { levelMm: middle('y'), plumbMm: middle('x') };
+}
