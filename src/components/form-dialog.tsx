@@ -4,6 +4,7 @@ import type { SheetForm } from '../lib/sheet-form.ts';
 import { Button } from './button.tsx';
 import { Actions, Dialog } from './dialog.tsx';
 import { ErrorState } from './error-state.tsx';
+import { LeaveGuard } from './leave-guard.tsx';
 import { Notice } from './notice.tsx';
 
 interface Props<In extends FieldValues, Out extends FieldValues> {
@@ -41,6 +42,7 @@ export function FormDialog<In extends FieldValues, Out extends FieldValues>({ ti
             </Notice>
           ) : null}
         </div>
+        {sheet.unsaved ? <LeaveGuard unsaved /> : null}
         <Actions>
           <Button onClick={close}>Cancel</Button>
           <Button type="submit" weight="primary" busy={sheet.sending}>

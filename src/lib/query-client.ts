@@ -1,11 +1,11 @@
 import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
 import { isCallError } from './call-error.ts';
-import { meQuery } from './session.ts';
+import { meQuery, sessionEndedQuery } from './session.ts';
 
-/** The cache of all that the server told. A session that ended anywhere ends everywhere. */
+/** The cache of all that the server told. A call that finds the session ended tells the shell, which asks to sign in again. */
 export function createQueryClient(): QueryClient {
   const onError = (error: Error) => {
-    if (isCallError(error, 'sign-in-needed')) client.setQueryData(meQuery.queryKey, null);
+    if (isCallError(error, 'sign-in-needed') && client.getQueryData(meQuery.queryKey)) client.setQueryData(sessionEndedQuery.queryKey, true);
   };
   const client: QueryClient = new QueryClient({
     queryCache: new QueryCache({ onError }),

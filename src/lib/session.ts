@@ -4,19 +4,31 @@ import { type Me, peopleApi } from '../../shared/people/people.api.ts';
 import { may } from '../../shared/people/permissions.ts';
 import { call } from './call.ts';
 import { isCallError } from './call-error.ts';
+import { keys } from './keys.ts';
 
-/** Who is signed in; null where nobody is. */
+/**
+ * Who is signed in; null where nobody was. A session that ends while someone works keeps their name here, so that the
+ * page and what is typed in it stay: `sessionEndedQuery` tells that it ended.
+ */
 export const meQuery = queryOptions({
-  queryKey: ['people', 'me'],
-  queryFn: async ({ signal }): Promise<Me | null> => {
+  queryKey: keys.me,
+  queryFn: async ({ client, signal }): Promise<Me | null> => {
     try {
       return await call(peopleApi.me, { signal });
     } catch (error) {
-      if (isCallError(error, 'sign-in-needed')) return null;
+      if (isCallError(error, 'sign-in-needed') && !client.getQueryData(keys.me)) return null;
       throw error;
     }
   },
-  staleTime: 5 * 60_000,
+  staleTime: 60_000,
+});
+
+/** Whether the session ended since the page was opened. Set by the query cache whenever a call is told so. */
+export const sessionEndedQuery = queryOptions({
+  queryKey: ['people', 'session ended'] as const,
+  queryFn: () => false,
+  initialData: false,
+  staleTime: Infinity,
 });
 
 /** Who is signed in, or null: for parts that also stand on pages without a session. Fetches nothing by itself. */

@@ -17,7 +17,7 @@ export interface SheetForm<In extends FieldValues, Out extends FieldValues> {
   /** An error that belongs to no field in sight. */
   failure: unknown;
   sending: boolean;
-  /** Something was typed that the server does not have. */
+  /** Something was typed that is neither sent nor being sent. */
   unsaved: boolean;
 }
 
@@ -39,7 +39,7 @@ export function useSheetForm<In extends FieldValues, Out extends FieldValues>({ 
       }
     }
   });
-  return { form, submit, failure, sending: isSubmitting, unsaved: isDirty && !isSubmitSuccessful };
+  return { form, submit, failure, sending: isSubmitting, unsaved: isDirty && !isSubmitting && !isSubmitSuccessful };
 }
 
 function fieldsOf(error: unknown): { path: string; words: string }[] {
