@@ -1,10 +1,10 @@
 /** `npm test`: every check there is, on a database of its own; the last line says how many held. */
-import { mkdtempSync, rmSync } from 'node:fs';
-import os from 'node:os';
+import { rmSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from './prepare/build.ts';
 import type { Database } from './prepare/mariadb.ts';
+import { makeOwnedFolder } from './prepare/owned-folder.ts';
 import { Problem } from './prepare/problem.ts';
 import { endProcess } from './prepare/processes.ts';
 import { prepareTools, type Tools } from './prepare/system-tools.ts';
@@ -13,18 +13,24 @@ import { startThrowawayDatabase } from './prepare/throwaway-database.ts';
 import { browserTools, databaseTools, pdfTools } from './prepare/tool-list.ts';
 
 const clone = path.resolve(path.dirname(fileURLToPath(import.meta.url)), '../..');
-const reports = mkdtempSync(path.join(os.tmpdir(), 'combwright-reports-'));
+const reports = makeOwnedFolder();
 /** What a person set for their own server must not reach the tests. */
 const notForTests = ['DATABASE_URL', 'DATA_DIR', 'PORT', 'APP_ORIGIN', 'JWT_SECRET', 'SMTP_URL', 'NODE_ENV', 'DEMO'];
 
-let database: Database | null = null;
 let running: number | null = null;
 let stopped = false;
 
 async function main(): Promise<Tally> {
   const tools = await prepareTools([databaseTools, browserTools, pdfTools]);
-  database = await startThrowawayDatabase(tools);
-  const env = testEnvironment(tools, database);
+  const database = await startThrowawayDatabase(tools);
+  try {
+    return await runAll(testEnvironment(tools, database));
+  } finally {
+    await database.stop();
+  }
+}
+
+async function runAll(env: NodeJS.ProcessEnv): Promise<Tally> {
   const results: [string, Tally][] = [];
   const run = async (step: Step) => {
     if (stopped) return;
@@ -54,22 +60,14 @@ function testEnvironment(tools: Tools, own: Database): NodeJS.ProcessEnv {
   };
 }
 
-async function cleanUp(): Promise<void> {
-  if (running !== null) await endProcess(running, 10_000);
-  await database?.stop();
-  database = null;
-  rmSync(reports, { recursive: true, force: true });
-}
-
-async function stopEarly(): Promise<void> {
-  if (stopped) return;
+/** Whoever asks to stop ends the step that runs; those after it are left out, and what was started is cleaned up. */
+function stopEarly(): void {
   stopped = true;
-  await cleanUp();
-  process.exit(130);
+  if (running !== null) void endProcess(running, 10_000);
 }
 
-for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => void stopEarly());
-process.on('disconnect', () => void stopEarly());
+for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, stopEarly);
+process.on('disconnect', stopEarly);
 process.stdout.on('error', () => {});
 process.stderr.on('error', () => {});
 
@@ -79,8 +77,7 @@ try {
 } catch (error) {
   console.error(error instanceof Problem ? error.message : error);
 }
-if (!stopped) {
-  await cleanUp();
-  console.log(`${tally.passed} passed, ${tally.failed} failed`);
-  process.exit(tally.failed === 0 ? 0 : 1);
-}
+rmSync(reports, { recursive: true, force: true });
+if (stopped) process.exit(130);
+console.log(`${tally.passed} passed, ${tally.failed} failed`);
+process.exit(tally.failed === 0 ? 0 : 1);

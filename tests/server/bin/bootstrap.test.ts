@@ -35,7 +35,8 @@ function lock(version: string): void {
 }
 
 function probe(code = 0, cwd = '.') {
-  const { npm_execpath: _npm, npm_lifecycle_event: _event, ...env } = process.env;
+  // As if called by hand, not by npm.
+  const env: NodeJS.ProcessEnv = { ...process.env, npm_execpath: '', npm_lifecycle_event: '' };
   const done = spawnSync(process.execPath, [path.join(copy, 'server/bin/bootstrap.mjs'), 'probe', String(code)], {
     cwd: path.join(copy, cwd),
     encoding: 'utf8',

@@ -10,7 +10,7 @@ import { databaseTools } from '../../../server/bin/prepare/tool-list.ts';
 
 const tools = findTools([databaseTools]);
 let home = '';
-let started: Database[] = [];
+const started: Database[] = [];
 
 beforeEach(() => {
   home = mkdtempSync(path.join(os.tmpdir(), 'combwright-test-'));
