@@ -38,6 +38,8 @@ export interface ScrewCapacity {
   /** Reference lateral value by mode after reduction, N; null when the screw is too short. */
   modes: ByMode | null;
   mode: YieldMode | null;
+  /** What that mode's yield load was divided by, R_d. */
+  reduction: number | null;
   /** Z: the least of the modes. Z': times C_D. Zero when too short. */
   lateralReferenceN: number;
   lateralN: number;
@@ -81,13 +83,14 @@ export function screwCapacity(joint: ScrewJoint): ScrewCapacity {
   const woodBearingMPa = woodBearing(gravity, screw.diameterMm, angleToGrainRad);
   const plateBearingMPa = steelBearing(plateMm);
   const deepEnough = penetrationMm >= leastPenetrationMm - 1e-9;
+  const terms = reductionTerms(screw.diameterMm, screw.rootDiameterMm, feelsGrain(screw.diameterMm) ? angleToGrainRad : 0);
   const modes = (gap: number) =>
     reduced(
       generalDowel({
         diameterMm: screw.rootDiameterMm, bendingYieldMPa: screw.bendingYieldMPa, sideMPa: plateBearingMPa, mainMPa: woodBearingMPa,
         sideMm: plateMm, mainMm: bearingMm, gapMm: gap,
       }),
-      reductionTerms(screw.diameterMm, screw.rootDiameterMm, feelsGrain(screw.diameterMm) ? angleToGrainRad : 0),
+      terms,
     );
   const withGap = deepEnough ? modes(gapMm) : null;
   const mode = withGap ? governing(withGap) : null;
@@ -95,7 +98,7 @@ export function screwCapacity(joint: ScrewJoint): ScrewCapacity {
   const without = deepEnough ? modes(0) : null;
   return {
     penetrationMm, leastPenetrationMm, comesThrough, threadMm, withdrawalPerMm: perMm, withdrawalN, steelTensionN, bearingMm,
-    woodBearingMPa, plateBearingMPa, modes: withGap, mode, lateralReferenceN, lateralN: lateralReferenceN * loadDuration,
+    woodBearingMPa, plateBearingMPa, modes: withGap, mode, reduction: mode && terms[mode], lateralReferenceN, lateralN: lateralReferenceN * loadDuration,
     lateralWithoutGapN: without ? without[governing(without)] : 0,
   };
 }

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { screwCapacity, combinedLoad } from '../../../shared/hardware/dowel.ts';
-import { standardLagScrew, standardWoodScrew, woodScrewSizes } from '../../../shared/hardware/screws.ts';
+import { standardLagScrew, standardWoodScrew, type WoodScrewSize } from '../../../shared/hardware/screws.ts';
 import { steelTension, withdrawalPerMm } from '../../../shared/hardware/withdrawal.ts';
 import { MM_PER_INCH, NEWTON_PER_POUND_FORCE } from '../../../shared/units/constants.ts';
 
@@ -63,7 +63,7 @@ describe('withdrawal of wood screws', () => {
       '#14': [121.7, 172.4, 309.6, 367.5],
     };
     for (const [size, row] of Object.entries(worked)) {
-      const screw = standardWoodScrew(size as (typeof woodScrewSizes)[number], 50);
+      const screw = standardWoodScrew(size as WoodScrewSize, 50);
       [0.42, 0.5, 0.67, 0.73].forEach((g, i) => expect(perInch(withdrawalPerMm('wood screw', g, screw.diameterMm))).toBeCloseTo(row[i] ?? NaN, 0));
     }
   });
