@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { bytes, endpoint, id } from '../api/endpoint.ts';
-import { Mark, Photo, Stud, Wall, WallShape } from './wall.ts';
+import { Mark, Obstruction, Photo, Stud, Wall, WallShape, Zone } from './wall.ts';
 
 const inWall = z.object({ wallId: id });
 const inPhoto = z.object({ wallId: id, photoId: id });
@@ -10,9 +10,14 @@ export const wallsApi = {
   create: endpoint({ method: 'post', path: '/api/jobs/:jobId/walls', permission: 'change jobs', status: 201, summary: 'Add a wall to a job.', params: z.object({ jobId: id }), body: WallShape, reply: Wall }),
   read: endpoint({ method: 'get', path: '/api/walls/:wallId', permission: 'read jobs', summary: 'One wall.', params: inWall, reply: Wall }),
   change: endpoint({
-    method: 'patch', path: '/api/walls/:wallId', permission: 'change jobs', summary: 'Change size, construction or studs of a wall.',
+    method: 'patch', path: '/api/walls/:wallId', permission: 'change jobs', summary: 'Change size, construction, studs, obstructions or zones of a wall; a list that is given takes the place of the one there.',
     params: inWall,
-    body: WallShape.partial().extend({ version: z.number().int(), studs: z.array(Stud).max(200).optional() }),
+    body: WallShape.partial().extend({
+      version: z.number().int(),
+      studs: z.array(Stud).max(200).optional(),
+      obstructions: z.array(Obstruction).max(200).optional(),
+      zones: z.array(Zone).max(50).optional(),
+    }),
     reply: Wall,
   }),
   upload: endpoint({

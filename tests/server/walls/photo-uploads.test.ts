@@ -1,0 +1,161 @@
+import { readdirSync, readFileSync } from 'node:fs';
+import { connect, type AddressInfo } from 'node:net';
+import path from 'node:path';
+import sharp from 'sharp';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { aJobSheet, aWallShape } from '../../support/builders.ts';
+import { aPicture, aPngThatDeclares, anIsoFile } from '../../support/pictures.ts';
+import { aBrowser, aShop, aTestApp, origin, type Browser, type TestApp } from '../../support/test-app.ts';
+
+let app: TestApp;
+let browser: Browser;
+let shopId: string;
+let wallId: string;
+
+beforeAll(async () => {
+  app = await aTestApp();
+  ({ browser, shopId } = await aShop(app));
+  const job = await browser.post('/api/jobs').send(aJobSheet()).expect(201);
+  wallId = (await browser.post(`/api/jobs/${job.body.id}/walls`).send(aWallShape()).expect(201)).body.id as string;
+});
+afterAll(() => app.close());
+
+/** A session as it travels in a request's header. */
+async function aCookie(): Promise<string> {
+  const email = `broken${Date.now()}@example.com`;
+  await browser.post('/api/people/members').send({ name: 'A maker', email, role: 'maker', password: 'another long password' }).expect(201);
+  const reply = await aBrowser(app).post('/api/people/sign-in').send({ email, password: 'another long password' }).expect(200);
+  return (reply.headers['set-cookie'] as unknown as string[]).map((c) => c.split(';')[0]).join('; ');
+}
+
+const send = (bytes: Buffer, name = 'photo.jpg') => browser.post(`/api/walls/${wallId}/photos`).attach('file', bytes, name);
+const filesKept = () => (readdirSync(path.join(app.dataDir, 'files'), { recursive: true }) as string[]).filter((f) => /\.\w+$/.test(f));
+const incoming = () => readdirSync(path.join(app.dataDir, 'incoming'));
+
+/** Deleting what came in follows the reply by a moment. */
+async function nothingIncoming(): Promise<void> {
+  await expect.poll(incoming, { timeout: 3000 }).toEqual([]);
+}
+
+describe('what is refused as a photo, each in its own words and without a trace', () => {
+  const cases: [string, () => Promise<Buffer> | Buffer, number, RegExp, string?][] = [
+    ['an empty file', () => Buffer.alloc(0), 415, /empty/],
+    ['words under a picture’s name', () => Buffer.from('A shopping list, not a photo. '.repeat(40)), 415, /not a picture/],
+    ['a drawing with a program in it', () => Buffer.from('<?xml version="1.0"?><svg xmlns="http://www.w3.org/2000/svg" onload="alert(1)"><script>alert(1)</script></svg>'), 415, /drawing or a web page/],
+    ['a drawing that calls out', () => Buffer.from('<svg xmlns="http://www.w3.org/2000/svg"><image href="http://127.0.0.1:9/x.png"/></svg>'), 415, /drawing or a web page/, 'wall.png'],
+    ['a web page', () => Buffer.from('  <!DOCTYPE html><html><script>alert(1)</script></html>'), 415, /drawing or a web page/],
+    ['a GIF', () => aPicture({ format: 'gif' }), 415, /GIF/, 'photo.jpg'],
+    ['a TIFF', () => aPicture({ format: 'tiff' }), 415, /TIFF/],
+    ['an AVIF', () => aPicture({ format: 'avif', width: 300, height: 300 }), 415, /AVIF/],
+    ['a phone’s HEIC', () => anIsoFile('heic'), 415, /HEIC.*JPEG/],
+    ['a film', () => anIsoFile('isom'), 415, /film/],
+    ['a PDF', () => Buffer.from('%PDF-1.7\n%âãÏÓ\n1 0 obj'), 415, /PDF/],
+    ['a JPEG cut off half way', async () => { const b = await aPicture({ width: 1600, height: 1200 }); return b.subarray(0, b.length / 2); }, 415, /cut off or damaged/],
+    ['a JPEG of two bytes more than its mark', () => Buffer.from([0xff, 0xd8, 0xff, 0xe0, 0]), 415, /cut off or damaged/],
+    ['a JPEG’s mark and then noise', () => Buffer.concat([Buffer.from([0xff, 0xd8, 0xff, 0xe1]), Buffer.alloc(5000, 0xa7)]), 415, /cut off or damaged/],
+    ['a PNG cut off half way', async () => { const b = await aPicture({ format: 'png', width: 1600, height: 1200 }); return b.subarray(0, b.length / 2); }, 415, /cut off or damaged/],
+    ['a WebP cut off half way', async () => { const b = await aPicture({ format: 'webp', width: 1600, height: 1200 }); return b.subarray(0, b.length / 2); }, 415, /cut off or damaged/],
+    ['a PNG that declares four thousand megapixels', () => aPngThatDeclares(65_000, 65_000), 413, /at most 60/],
+    ['a PNG that declares just over sixty megapixels', () => aPngThatDeclares(10_000, 6001), 413, /at most 60/],
+    ['a PNG that declares more than it holds', () => aPngThatDeclares(7000, 7000), 415, /cut off or damaged/],
+    ['a thumbnail', () => aPicture({ width: 120, height: 90 }), 400, /too small/],
+    ['more than 40 MB', () => Buffer.alloc(40 * 1024 * 1024 + 1, 0xff), 413, /larger than 40 MB/],
+  ];
+  it.each(cases)('%s', async (_what, make, status, words, name = 'photo.jpg') => {
+    const reply = await send(await make(), name);
+    expect([reply.status, reply.body.detail]).toEqual([status, expect.stringMatching(words)]);
+    expect(reply.type).toBe('application/problem+json');
+    await nothingIncoming();
+    expect(filesKept()).toEqual([]);
+  });
+
+  it('no file at all, two files, or a file under another name', async () => {
+    const good = await aPicture();
+    expect((await browser.post(`/api/walls/${wallId}/photos`).field('note', 'x')).body.detail).toMatch(/choose a photo/);
+    expect((await send(good).attach('file', good, 'b.jpg')).status).toBe(400);
+    expect((await browser.post(`/api/walls/${wallId}/photos`).attach('photo', good, 'b.jpg')).status).toBe(400);
+    expect((await browser.post(`/api/walls/${wallId}/photos`).send({ file: 'x' })).status).toBe(400);
+    await nothingIncoming();
+  });
+});
+
+describe('an upload that breaks off half way', () => {
+  it('leaves nothing behind', async () => {
+    const server = app.app.listen(0, '127.0.0.1');
+    await new Promise((ready) => server.once('listening', ready));
+    const cookie = await aCookie();
+    const port = (server.address() as AddressInfo).port;
+    const socket = connect(port, '127.0.0.1');
+    socket.on('error', () => undefined);
+    socket.write(
+      `POST /api/walls/${wallId}/photos HTTP/1.1\r\nHost: 127.0.0.1\r\nOrigin: ${origin}\r\nCookie: ${cookie}\r\n` +
+        'Content-Type: multipart/form-data; boundary=b\r\nContent-Length: 900000\r\n\r\n' +
+        '--b\r\nContent-Disposition: form-data; name="file"; filename="a.jpg"\r\nContent-Type: image/jpeg\r\n\r\n',
+    );
+    socket.write(Buffer.alloc(200_000, 0xff));
+    await expect.poll(incoming, { timeout: 3000 }).toHaveLength(1);
+    socket.destroy();
+    await nothingIncoming();
+    await new Promise((closed) => server.close(closed));
+  });
+});
+
+describe('a photo that is taken', () => {
+  it('may lie about its name: content decides, and the name never becomes a path', async () => {
+    const reply = await send(await aPicture({ format: 'png' }), '../../../outside.jpg').expect(201);
+    expect(reply.body).toMatchObject({ widthPx: 800, heightPx: 600, marks: null, elevation: null });
+    expect(filesKept().every((f) => f.startsWith(`${shopId}/`))).toBe(true);
+    await nothingIncoming();
+  });
+
+  // Exif 2.32, tag 0x0112: where the stored row 0 and column 0 lie in the upright picture.
+  it.each([
+    [1, 'top left', 'top right'], [2, 'top right', 'top left'], [3, 'bottom right', 'bottom left'], [4, 'bottom left', 'bottom right'],
+    [5, 'top left', 'bottom left'], [6, 'top right', 'bottom right'], [7, 'bottom right', 'top right'], [8, 'bottom left', 'top left'],
+  ])('with orientation %i stands upright: its first pixel at the %s, the end of its first row at the %s', async (orientation, redAt, greenAt) => {
+    const reply = await send(await aPicture({ width: 800, height: 600, orientation })).expect(201);
+    const turned = orientation >= 5;
+    expect([reply.body.widthPx, reply.body.heightPx]).toEqual(turned ? [600, 800] : [800, 600]);
+    const preview = await browser.get(reply.body.previewUrl).expect(200);
+    expect(await colouredCorners(preview.body as Buffer)).toEqual({ [redAt]: 'red', [greenAt]: 'green' });
+  });
+
+  it('is served without place, camera or any other metadata, while the original stays as it was sent', async () => {
+    const original = await aPicture({ width: 3000, height: 2000, gps: true });
+    expect((await sharp(original).metadata()).exif).toBeDefined();
+    const reply = await send(original).expect(201);
+    const preview = await browser.get(reply.body.previewUrl).expect(200);
+    expect(preview.headers).toMatchObject({
+      'content-type': 'image/jpeg', 'x-content-type-options': 'nosniff', 'content-disposition': 'inline', 'cache-control': expect.stringMatching(/^private/),
+    });
+    const meta = await sharp(preview.body as Buffer).metadata();
+    expect(meta).toMatchObject({ width: 2048, height: 1365 });
+    for (const part of ['exif', 'iptc', 'xmp', 'icc', 'orientation'] as const) expect(meta[part]).toBeUndefined();
+    expect((preview.body as Buffer).includes('Invented')).toBe(false);
+    expect(filesKept().some((f) => readFileSync(path.join(app.dataDir, 'files', f)).equals(original))).toBe(true);
+  });
+
+  it('takes the place of the one before, whose files are deleted, and can be taken off', async () => {
+    const first = await send(await aPicture()).expect(201);
+    const second = await send(await aPicture()).expect(201);
+    expect(filesKept()).toHaveLength(2);
+    await browser.get(first.body.previewUrl).expect(404);
+    const wall = await browser.delete(`/api/walls/${wallId}/photos/${second.body.id}`).expect(200);
+    expect(wall.body.photo).toBeNull();
+    expect(filesKept()).toEqual([]);
+  });
+});
+
+async function colouredCorners(jpeg: Buffer): Promise<Record<string, string>> {
+  const { data, info } = await sharp(jpeg).raw().toBuffer({ resolveWithObject: true });
+  const found: Record<string, string> = {};
+  for (const [row, y] of [['top', 10], ['bottom', info.height - 10]] as const) {
+    for (const [column, x] of [['left', 10], ['right', info.width - 10]] as const) {
+      const i = (y * info.width + x) * info.channels;
+      const [r, g] = [data[i]!, data[i + 1]!];
+      if (r > 150 && g < 90) found[`${row} ${column}`] = 'red';
+      else if (g > 110 && r < 90) found[`${row} ${column}`] = 'green';
+    }
+  }
+  return found;
+}
