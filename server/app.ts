@@ -13,6 +13,9 @@ import type { Database } from './database/data-source.ts';
 import type { FakeMailServer } from './fakes/mail-server.ts';
 import { createFileStore } from './files/file-store.ts';
 import { createReceiver } from './files/receive.ts';
+import { hardwareRepository } from './hardware/hardware.repository.ts';
+import { hardwareRoutes } from './hardware/hardware.routes.ts';
+import { hardwareService } from './hardware/hardware.service.ts';
 import { answerErrors, nothingHere } from './http/errors.ts';
 import { limitPerMinute } from './http/limits.ts';
 import { Mount, type Mounted } from './http/mount.ts';
@@ -111,6 +114,7 @@ export function createApp(parts: Parts): { app: Express; mounted: Mounted[]; roo
   });
   peopleRoutes(mount, rooms.people, cookies);
   jobsRoutes(mount, rooms.jobs);
+  hardwareRoutes(mount, rooms.hardware);
   patternsRoutes(mount, rooms.patterns);
   wallsRoutes(mount, rooms.walls);
   layoutsRoutes(mount, rooms.layouts);
@@ -126,7 +130,8 @@ export function createApp(parts: Parts): { app: Express; mounted: Mounted[]; roo
 
 function createRooms({ config, data, outbox, pool, clock, bcryptCost }: Parts) {
   const files = createFileStore(config.dataDir);
-  const people = peopleService(peopleRepository(data), clock, bcryptCost);
+  const hardware = hardwareService(hardwareRepository(data), clock);
+  const people = peopleService(peopleRepository(data), clock, hardware.stockUp, bcryptCost);
   const jobs = jobsService(jobsRepository(data), people, clock);
   const patterns = patternsService(patternsRepository(data), clock);
   const walls = wallsService({ walls: wallsRepository(data), jobs, files, pool, clock });
@@ -137,7 +142,7 @@ function createRooms({ config, data, outbox, pool, clock, bcryptCost }: Parts) {
     wallsOf: (job) => walls.ofJob(job.shopId, job.id),
     layoutsOf: (job) => layouts.ofJob(job.shopId, job.id),
   });
-  return { people, jobs, patterns, walls, layouts, signoffs, templates };
+  return { people, hardware, jobs, patterns, walls, layouts, signoffs, templates };
 }
 export type Rooms = ReturnType<typeof createRooms>;
 

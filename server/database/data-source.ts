@@ -1,5 +1,6 @@
 import 'reflect-metadata';
 import { DataSource } from 'typeorm';
+import { HardwareRow } from './entities/hardware.ts';
 import { AssignmentRow, JobRow } from './entities/jobs.ts';
 import { FrameRow, LayoutRow, LinkRow, PatternRow, RevisionRow } from './entities/layouts.ts';
 import { OutboxRow } from './entities/mail.ts';
@@ -9,7 +10,7 @@ import { migrations } from './migrations/all.ts';
 
 export const entities = [
   ShopRow, UserRow, SessionRow, JobRow, AssignmentRow, WallRow, StudRow, PhotoRow,
-  PatternRow, LayoutRow, FrameRow, RevisionRow, LinkRow, OutboxRow,
+  HardwareRow, PatternRow, LayoutRow, FrameRow, RevisionRow, LinkRow, OutboxRow,
 ];
 
 export type Database = DataSource;

@@ -19,8 +19,8 @@ export interface SignedIn {
   refreshToken: string | null;
 }
 
-/** Shops, their people, and who is signed in. */
-export function peopleService(people: PeopleRepository, clock: () => Date, bcryptCost = 12) {
+/** Shops, their people, and who is signed in. `furnish` is told of each new shop, to give it what every shop starts with. */
+export function peopleService(people: PeopleRepository, clock: () => Date, furnish: (shopId: string) => Promise<void>, bcryptCost = 12) {
   // Compared against when the address is unknown, so that both answers take as long.
   const decoy = bcrypt.hash(newToken(), bcryptCost);
 
@@ -41,6 +41,7 @@ export function peopleService(people: PeopleRepository, clock: () => Date, bcryp
       const shop = { id: randomUUID(), name: input.shopName, units: input.units, createdAt: now };
       const owner = await newUser(shop.id, { ...input, role: 'owner' }, now, bcryptCost);
       if (!(await people.addShop(shop, owner))) throw emailTaken();
+      await furnish(shop.id);
       return begin({ ...owner, shop }, device);
     },
 

@@ -1,5 +1,5 @@
 import type { QueryOf } from '../../shared/api/endpoint.ts';
-import { placedHangers, placedOutline } from '../../shared/patterns/placed.ts';
+import { placedHangers, placedOutline } from '../../shared/patterns/hangers.ts';
 import type { TemplateInput } from '../../shared/templates/template-input.ts';
 import type { templatesApi } from '../../shared/templates/templates.api.ts';
 import { isConfirmed } from '../../shared/walls/wall.ts';

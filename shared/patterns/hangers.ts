@@ -73,7 +73,7 @@ export function defaultHangers(design: FrameForm): Hanger[] {
   const hanger = (id: string, member: Member, share: number, reach: [number, number]): Hanger => {
     const half = Math.max(0, member.shortPointMm / 2 - keepFromEndMm);
     const shift = innerShift(member, thicknessMm);
-    return { id, member: member.index, alongMm: shift + share * half, insetMm, allowanceMm: [(reach[0] - share) * half || 0, (reach[1] - share) * half || 0], bracketId: null, wallScrewId: null };
+    return { id, member: member.index, alongMm: shift + share * half, insetMm, allowanceMm: [(reach[0] - share) * half || 0, (reach[1] - share) * half || 0], bracketId: null, wallScrewId: null, anchorId: null };
   };
   // A member on top runs to the left: its outer face looks up.
   const offLevel = (member: Member) => Math.abs(Math.abs(member.inclinationRad) - Math.PI);

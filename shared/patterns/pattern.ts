@@ -28,7 +28,10 @@ export const Hanger = z.object({
     measure('The upper allowance').min(0, 'The upper allowance is zero or more.'),
   ]),
   bracketId: id.nullable(),
+  /** Screw into a stud. */
   wallScrewId: id.nullable(),
+  /** Anchor where there is no stud. */
+  anchorId: id.nullable().default(null),
 });
 export type Hanger = z.infer<typeof Hanger>;
 

@@ -9,7 +9,7 @@ export function aDesign(change: Partial<PatternDesign> = {}): PatternDesign {
   return {
     shape: { kind: 'regular', sides: 6, sideMm: 177.8 },
     thicknessMm: 19.05, depthMm: 127, species: 'walnut', moisturePercent: 8, groove: null,
-    hangers: [-50, 50].map((alongMm, i) => ({ id: `h${i + 1}`, member: 3, alongMm, insetMm: 30, allowanceMm: [-20, 20], bracketId: null, wallScrewId: null })),
+    hangers: [-50, 50].map((alongMm, i) => ({ id: `h${i + 1}`, member: 3, alongMm, insetMm: 30, allowanceMm: [-20, 20], bracketId: null, wallScrewId: null, anchorId: null })),
     contentsKg: null,
     ...change,
   };

@@ -7,7 +7,7 @@ import type { PatternDesign } from '../../../shared/patterns/pattern.ts';
 const square: PatternDesign = {
   shape: { kind: 'rectangle', widthMm: 400, heightMm: 400 }, thicknessMm: 20, depthMm: 100, species: 'walnut', moisturePercent: 8,
   groove: { widthMm: 6, depthMm: 7, clearanceMm: 1, mirrorMm: 3, backerMm: 3 },
-  hangers: [{ id: 'a', member: 2, alongMm: 120, insetMm: 10, allowanceMm: [-50, 50], bracketId: null, wallScrewId: null }], contentsKg: null,
+  hangers: [{ id: 'a', member: 2, alongMm: 120, insetMm: 10, allowanceMm: [-50, 50], bracketId: null, wallScrewId: null, anchorId: null }], contentsKg: null,
 };
 const frame: Frame = { id: 'f', patternId: 'p', xMm: 1000, yMm: 1500, turnRad: 0, flipped: false, locked: false, label: '7', contentsKg: null, hungGroup: null };
 const of = <K extends Primitive['kind']>(all: Primitive[], kind: K) => all.filter((p): p is Extract<Primitive, { kind: K }> => p.kind === kind);

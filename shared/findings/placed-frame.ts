@@ -1,0 +1,49 @@
+import type { Point } from '../geometry/point.ts';
+import { placed } from '../geometry/point.ts';
+import { boxOf, type Box } from '../geometry/polygon.ts';
+import type { Frame, LayoutPattern } from '../layouts/layout.ts';
+import { contentsOf, type Contents } from '../patterns/contents.ts';
+import { placedHangers, placedOutline, type PlacedHanger } from '../patterns/hangers.ts';
+import { frameMass, type FrameMass } from '../patterns/mass.ts';
+import type { PatternDesign } from '../patterns/pattern.ts';
+
+/** A frame on the wall with what follows from its place and its pattern. */
+export interface PlacedFrame {
+  frame: Frame;
+  pattern: LayoutPattern;
+  outline: Point[];
+  box: Box;
+  hangers: PlacedHanger[];
+  mass: FrameMass;
+  contents: Contents;
+  /** Centre of mass of frame and contents, wall coordinates; the contents are taken to lie at the frame's own centre. */
+  centre: { x: number; y: number; z: number };
+}
+
+const masses = new WeakMap<PatternDesign, FrameMass>();
+
+/** Mass of a design, worked out once for each design object. */
+export function massOf(design: PatternDesign): FrameMass {
+  let mass = masses.get(design);
+  if (!mass) masses.set(design, (mass = frameMass(design)));
+  return mass;
+}
+
+export function placeFrame(frame: Frame, pattern: LayoutPattern): PlacedFrame {
+  const { design } = pattern;
+  const outline = placedOutline(frame, design);
+  const mass = massOf(design);
+  return {
+    frame,
+    pattern,
+    outline,
+    box: boxOf(outline),
+    hangers: placedHangers(frame, design),
+    mass,
+    contents: contentsOf(design, frame),
+    centre: { ...placed(mass.centre, frame), z: mass.centre.z },
+  };
+}
+
+export const nameOf = ({ frame, pattern }: Pick<PlacedFrame, 'frame' | 'pattern'>): string => (frame.label ? `Frame ${frame.label}` : pattern.name);
+export const hangerKey = (frame: { id: string }, hanger: { id: string }): string => `${frame.id}/${hanger.id}`;
