@@ -1,4 +1,5 @@
 import { boxOf } from '../../../shared/geometry/polygon.ts';
+import { placedMembers } from '../../../shared/patterns/hangers.ts';
 import { outlineOf, ShapeError } from '../../../shared/patterns/outline.ts';
 import type { PatternDesign } from '../../../shared/patterns/pattern.ts';
 import { FrameDrawing } from './frame-drawing.tsx';
@@ -6,15 +7,43 @@ import { viewBoxOf } from './svg-path.ts';
 
 const own = { xMm: 0, yMm: 0, turnRad: 0, flipped: false };
 
+interface Props {
+  design: PatternDesign;
+  label: string;
+  /** Writes each member's number, from 1 at the lowest side, inside the opening. */
+  memberNumbers?: boolean;
+  className?: string;
+}
+
 /** One frame design, as large as its place allows; nothing where the shape cannot be made. */
-export function PatternDrawing({ design, label, className }: { design: PatternDesign; label: string; className?: string }) {
+export function PatternDrawing({ design, label, memberNumbers = false, className }: Props) {
   const box = outlineBox(design);
   if (!box) return null;
   const margin = Math.max(box.right - box.left, box.top - box.bottom) * 0.08;
   return (
     <svg role="img" aria-label={label} viewBox={viewBoxOf(box, margin)} className={className}>
       <FrameDrawing design={design} at={own} hangers />
+      {memberNumbers ? <MemberNumbers design={design} sizeMm={margin * 0.7} /> : null}
     </svg>
+  );
+}
+
+function MemberNumbers({ design, sizeMm }: { design: PatternDesign; sizeMm: number }) {
+  return (
+    <g className="fill-ink-700 font-semibold">
+      {placedMembers(own, design).map(({ index, innerFrom, innerTo, inclinationRad }) => (
+        <text
+          key={index}
+          x={(innerFrom.x + innerTo.x) / 2 - Math.sin(inclinationRad) * sizeMm}
+          y={-(innerFrom.y + innerTo.y) / 2 - Math.cos(inclinationRad) * sizeMm}
+          fontSize={sizeMm}
+          textAnchor="middle"
+          dominantBaseline="central"
+        >
+          {index + 1}
+        </text>
+      ))}
+    </g>
   );
 }
 
