@@ -37,7 +37,7 @@ export function forbidden(from, target) {
     if (b.top === 'src') return 'server/ and src/ never meet';
     const fromGround = serverGround.includes(a.room);
     const toRoom = b.top === 'server' && rooms.includes(b.room);
-    if (fromGround && toRoom && !a.rest.startsWith('seed/')) return `server/${a.room} knows no room`;
+    if (fromGround && toRoom && !/^(seed|tasks)\//.test(a.rest)) return `server/${a.room} knows no room`;
     if (toRoom && rooms.includes(a.room) && a.room !== b.room && !/\.service\.tsx?$/.test(b.name)) {
       return 'a room enters another only by its service';
     }

@@ -18,9 +18,8 @@ export function sheetMap(input: TemplateInput, plan: SheetPlan, datums: Datums, 
     if (!stud.confirmed) items.push(text('front', { x: x + 0.5, y: area.y + 1 }, '?', 3.4, { colour: 'chalk', weight: 'bold' }));
   }
   for (const sheet of plan.sheets) {
-    // Each sheet is drawn to where the next one's cut edge comes, so that the map shows what is seen once they are taped.
-    const seen = { ...sheet.window, width: sheet.right ? plan.step.x : sheet.window.width, height: sheet.above ? plan.step.y : sheet.window.height };
-    const r = scaled(seen);
+    // Each sheet is drawn to where the next one's cut edge comes: what is seen once they are taped.
+    const r = scaled({ ...sheet.window, width: plan.step.x, height: plan.step.y });
     const size = Math.min(3.6, r.height * 0.35, r.width * 0.35);
     items.push(
       rectangle('front', r, { colour: 'grey', widthMm: 0.2 }),

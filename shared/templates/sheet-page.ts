@@ -37,11 +37,10 @@ export function sheetPage(input: TemplateInput, plan: SheetPlan, sheet: Sheet, d
     ...datumLines(input, sheet, plan, datums, toPage),
     ...frames.flatMap((f) => f.hangers.filter((h) => near(h, sheet)).flatMap((h) => crossHair(toPage(h)))),
     ...labels(input, frames, sheet, plan, toPage),
-    ...joins(sheet, plan, datums, input.units, toPage),
   ];
   return {
     name: sheet.name, widthMm, heightMm,
-    items: [{ kind: 'clip', rect: live, items: shown }, ...sheetTitle(input, plan.format, sheet.name, true)],
+    items: [{ kind: 'clip', rect: live, items: shown }, ...joins(sheet, plan, datums, input.units, toPage), ...sheetTitle(input, plan.format, sheet.name, true)],
   };
 }
 
@@ -140,7 +139,10 @@ function datumLines(input: TemplateInput, { window }: Sheet, plan: SheetPlan, da
 
 function labels(input: TemplateInput, frames: TemplateFrame[], sheet: Sheet, plan: SheetPlan, toPage: (p: Point) => Point): Primitive[] {
   const { live } = plan.format;
-  const inner = { x: live.x + 5, y: live.y + 5, width: live.width - 7, height: live.height - 7 };
+  // Labels keep to what is still seen once the neighbours lie over the overlap.
+  const width = sheet.right ? plan.step.x * input.correction.x : live.width;
+  const height = sheet.above ? plan.step.y * input.correction.y : live.height;
+  const inner = { x: live.x + 6.5, y: live.y + 5, width: width - 7.5, height: height - 6 };
   const pageOutlines = frames.map((f) => f.outlineMm.map(toPage));
   const lines = pageOutlines.flatMap(sidesOf);
   const places = new LabelPlaces(inner, lines);
@@ -170,7 +172,7 @@ function screwLabel(screw: TemplateHanger, at: Point, units: 'in' | 'mm', places
     { words: screw.label, size: 4.6, weight: 'bold' as const },
     { words: drillText(screw, units), size: 2.8, weight: 'bold' as const },
     { words: screw.hardware, size: 2.6, weight: 'regular' as const },
-    { words: `${formatLength(screw.x, units)} right, ${formatLength(screw.y, units)} up`, size: 2.4, weight: 'regular' as const },
+    { words: `${formatLength(screw.x, units)} from left, ${formatLength(screw.y, units)} up`, size: 2.4, weight: 'regular' as const },
   ].filter((r) => r.words !== '');
   const width = Math.min(70, Math.max(...rows.map((r) => estimateWidth(r.words, r.size, r.weight))));
   const height = rows.reduce((sum, r) => sum + r.size * 1.15, 0);

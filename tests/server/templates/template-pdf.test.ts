@@ -1,0 +1,160 @@
+import { execFileSync } from 'node:child_process';
+import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import path from 'node:path';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import template from '../../../server/workers/tasks/template.ts';
+import type { TemplateInput } from '../../../shared/templates/template-input.ts';
+import { aHexagon, aTemplate } from '../../shared/templates/a-template.ts';
+import { dotsPerMm, PrintedPage } from './printed-page.ts';
+
+let folder: string;
+beforeAll(() => {
+  folder = mkdtempSync(path.join(tmpdir(), 'template-'));
+});
+afterAll(() => rmSync(folder, { recursive: true, force: true }));
+
+let count = 0;
+async function print(input: TemplateInput): Promise<string> {
+  const file = path.join(folder, `${(count += 1)}.pdf`);
+  writeFileSync(file, await template(input));
+  return file;
+}
+
+function info(pdf: string): { sizesPt: [number, number][]; text: string } {
+  const text = execFileSync('pdfinfo', ['-l', '999', '-box', pdf], { encoding: 'utf8' });
+  const boxes = [...text.matchAll(/Page +\d+ (MediaBox|CropBox): +([\d.]+) +([\d.]+) +([\d.]+) +([\d.]+)/g)];
+  return { text, sizesPt: boxes.map((b) => [Number(b[4]) - Number(b[2]), Number(b[5]) - Number(b[3])]) };
+}
+
+/** The first and the last of the frames only: pages take a while to read. */
+const fewer = (input: TemplateInput): TemplateInput => ({ ...input, frames: [input.frames[0]!, input.frames.at(-1)!] });
+
+/** `17 7/8"` or `452 mm`, in mm, by its own reading. */
+function read(words: string): number {
+  const metric = /^([\d.]+) mm$/.exec(words);
+  if (metric) return Number(metric[1]);
+  const inches = /^(?:(\d+) ?)??(?:(\d+)\/(\d+))?"$/.exec(words)!;
+  return 25.4 * (Number(inches[1] ?? 0) + (inches[2] ? Number(inches[2]) / Number(inches[3]) : 0));
+}
+
+const length = '([\\d./ ]+(?: mm|"))';
+
+interface Checked {
+  page: number;
+  bars: { axis: 'across' | 'up'; statedMm: number; printedMm: number }[];
+  screws: { x: number; y: number }[];
+}
+
+/** Reads every sheet as the hanger does: where its cut edges say they are, how long its bars are, and where its cross-hairs stand. */
+async function readSheets(pdf: string, correction = { x: 1, y: 1 }): Promise<Checked[]> {
+  const pages = Number(/Pages: +(\d+)/.exec(info(pdf).text)![1]);
+  const sheets: Checked[] = [];
+  for (let page = 1; page <= pages; page += 1) {
+    const printed = await PrintedPage.read(pdf, page);
+    const bars = (['across', 'up'] as const).map((axis) => {
+      const stated = new RegExp(`This bar is ${length} ${axis}`).exec(printed.words);
+      return { axis, statedMm: read(stated![1]!), printedMm: printed.barLength(axis) };
+    });
+    const fromLeft = new RegExp(`this edge is ${length} from the wall’s left edge`).exec(printed.words);
+    const aboveFloor = new RegExp(`this edge is ${length} above the floor`).exec(printed.words);
+    const screws = [];
+    if (fromLeft && aboveFloor) {
+      const edges = printed.cutEdges();
+      for (const dot of printed.crossHairs()) {
+        screws.push({
+          x: read(fromLeft[1]!) + (dot.x - edges.x) / dotsPerMm / correction.x,
+          y: read(aboveFloor[1]!) + (edges.y - dot.y) / dotsPerMm / correction.y,
+        });
+      }
+    }
+    sheets.push({ page, bars, screws });
+  }
+  return sheets;
+}
+
+function expectTrue(sheets: Checked[], input: TemplateInput, correction = { x: 1, y: 1 }): void {
+  for (const { page, bars } of sheets) {
+    for (const bar of bars) {
+      const wanted = bar.statedMm * correction[bar.axis === 'across' ? 'x' : 'y'];
+      expect(Math.abs(bar.printedMm - wanted), `bar ${bar.axis} on page ${page}: ${bar.printedMm} for ${wanted}`).toBeLessThan(0.1);
+    }
+  }
+  const found = sheets.flatMap((s) => s.screws);
+  const wanted = input.frames.flatMap((f) => f.hangers);
+  for (const screw of wanted) {
+    const nearest = Math.min(...found.map((f) => Math.hypot(f.x - screw.x, f.y - screw.y)));
+    expect(nearest, `screw ${screw.label}`).toBeLessThan(0.2);
+  }
+  for (const cross of found) {
+    const nearest = Math.min(...wanted.map((w) => Math.hypot(cross.x - w.x, cross.y - w.y)));
+    expect(nearest, `a cross-hair at ${cross.x}, ${cross.y}`).toBeLessThan(0.2);
+  }
+}
+
+// Pages are drawn and read at 300 dpi, which takes a busy machine its time.
+describe('a printed template', { timeout: 120_000 }, () => {
+  // Sizes: ANSI/ASME Y14.1 size A is 8 1/2 by 11 in; ISO 216 A4 is 210 by 297 mm. 72 units of a PDF are one inch (ISO 32000).
+  it.each([
+    ['letter', [8.5 * 25.4, 11 * 25.4]],
+    ['a4', [210, 297]],
+  ] as const)('has pages of exactly %s paper, upright or lying, and asks not to be scaled', async (paper, size) => {
+    const pdf = await print(aTemplate({ paper }));
+    const { sizesPt, text } = info(pdf);
+    expect(sizesPt.length).toBeGreaterThan(4);
+    for (const pt of sizesPt) {
+      const mm = pt.map((n) => (n / 72) * 25.4).sort((a, b) => a - b);
+      expect(Math.abs(mm[0]! - size[0])).toBeLessThan(0.1);
+      expect(Math.abs(mm[1]! - size[1])).toBeLessThan(0.1);
+    }
+    expect(text).toMatch(/Producer: +Combwright\n/);
+    expect(text).toMatch(/Title: +Hanging template: Reading corner/);
+    const objects = execFileSync('qpdf', ['--qdf', '--object-streams=disable', pdf, '-'], { encoding: 'latin1' });
+    expect(objects).toMatch(/\/PrintScaling \/None/);
+    expect(objects).toMatch(/\/Lang \(en\)/);
+    execFileSync('qpdf', ['--check', pdf]);
+  });
+
+  it('puts every screw within 0.2 mm of its place and prints bars as long as they say, on A4 in millimetres', async () => {
+    const input = aTemplate({ paper: 'a4', units: 'mm' });
+    expectTrue(await readSheets(await print(input)), input);
+  });
+
+  it('does so on Letter in inches too, unsigned mark and all', async () => {
+    const input = fewer(aTemplate({ paper: 'letter', units: 'in', state: 'draft' }));
+    expectTrue(await readSheets(await print(input)), input);
+  });
+
+  it('stretches bars and screws alike by the correction of the printer', async () => {
+    const correction = { x: 1.012, y: 0.994 };
+    const input = fewer(aTemplate({ paper: 'a4', units: 'mm', correction }));
+    expectTrue(await readSheets(await print(input), correction), input, correction);
+  });
+
+  it('keeps letters of many scripts readable and never fails on one it cannot draw', async () => {
+    const input = aTemplate({ paper: 'a4' });
+    input.title.job = 'Łąka — Večer Ångström, Київ 木の棚 🪵 \u0007→ ½';
+    const words = execFileSync('pdftotext', ['-l', '1', await print(input), '-'], { encoding: 'utf8' });
+    expect(words).toContain('Łąka — Večer Ångström, Київ');
+  });
+
+  it('prints a mark across every sheet, and says why, until it is signed', async () => {
+    const one = (state: TemplateInput['title']['state']) => print({ ...aTemplate({ state }), frames: [aHexagon('1', 600, 900, 75)] });
+    const sent = await PrintedPage.read(await one('with client'), 3);
+    expect(sent.words).toContain('not signed (with client)');
+    expect(sent.paleRedShare()).toBeGreaterThan(0.02);
+    const signed = await PrintedPage.read(await one('signed'), 3);
+    expect(signed.words).toContain('Revision B · signed');
+    expect(signed.paleRedShare()).toBe(0);
+  });
+
+  it('still has a front page when no frame is placed', async () => {
+    const pdf = await print({ ...aTemplate({}), frames: [] });
+    execFileSync('qpdf', ['--check', pdf]);
+  });
+
+  it('draws a frame of one sheet whole', async () => {
+    const input = { ...aTemplate({ paper: 'a4' }), frames: [aHexagon('1', 600, 900, 75)] };
+    expectTrue(await readSheets(await print(input)), input);
+  });
+});
