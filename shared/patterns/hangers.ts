@@ -1,5 +1,5 @@
 import { placed, type Placement, type Point, type Segment } from '../geometry/point.ts';
-import { placedAll, reversed } from '../geometry/polygon.ts';
+import { boxOf, placedAll, reversed } from '../geometry/polygon.ts';
 import { frameGeometry, type FrameForm } from './frame.ts';
 import { membersOf, type Member } from './members.ts';
 import { outlineOf } from './outline.ts';
@@ -64,24 +64,39 @@ const keepFromEndMm = 15;
 
 /**
  * Two hangers on what is uppermost as the pattern lies: both on a top member that is near level, else one on each of the two members that
- * meet at the highest corner. In the middle of the lip (or of the member, without a groove); each may slide outwards to 15 mm from the end
- * of the inner face, and inwards as far as leaves the two apart. Common practice; brackets and screws are left to be chosen.
+ * meet at the highest corner, at one height. In the middle of the lip (or of the member, without a groove), and free to slide along the
+ * inner face as far as leaves 15 mm at its ends and the two apart. Common practice; brackets and screws are left to be chosen.
  */
 export function defaultHangers(design: FrameForm): Hanger[] {
-  const { members, groove, thicknessMm } = frameGeometry(design);
+  const { members, groove, thicknessMm, outline, heightMm } = frameGeometry(design);
   const insetMm = (groove ? groove.lipMm : thicknessMm) / 2;
-  const hanger = (id: string, member: Member, share: number, reach: [number, number]): Hanger => {
-    const half = Math.max(0, member.shortPointMm / 2 - keepFromEndMm);
-    const shift = innerShift(member, thicknessMm);
-    return { id, member: member.index, alongMm: shift + share * half, insetMm, allowanceMm: [(reach[0] - share) * half || 0, (reach[1] - share) * half || 0], bracketId: null, wallScrewId: null, anchorId: null };
-  };
   // A member on top runs to the left: its outer face looks up.
   const offLevel = (member: Member) => Math.abs(Math.abs(member.inclinationRad) - Math.PI);
   const tops = members.filter((member) => offLevel(member) <= nearLevelRad);
   const level = tops.find((member) => tops.length === 1 || offLevel(member) < 1e-6);
+  const hanger = (id: string, member: Member, share: number, reach: [number, number]): Hanger => {
+    const half = halfUsable(member);
+    const alongMm = innerShift(member, thicknessMm) + share * half;
+    return { id, member: member.index, alongMm, insetMm, allowanceMm: [(reach[0] - share) * half || 0, (reach[1] - share) * half || 0], bracketId: null, wallScrewId: null, anchorId: null };
+  };
   if (level) return [hanger('left', level, 0.6, [0.25, 1]), hanger('right', level, -0.6, [-1, -0.25])];
   const { left, right } = atHighestCorner(members);
-  return [hanger('left', left, -0.4, [-1, 0.5]), hanger('right', right, 0.4, [-0.5, 1])];
+  const height = boxOf(outline).top - 0.3 * heightMm;
+  const atHeight = (member: Member): number => shareAtHeight(member, height, insetMm, thicknessMm);
+  const around = (share: number): [number, number] => [Math.max(-1, share - 0.6), Math.min(1, share + 0.6)];
+  return [hanger('left', left, atHeight(left), around(atHeight(left))), hanger('right', right, atHeight(right), around(atHeight(right)))];
+}
+
+/** Half the inner face, less what is kept from its ends. */
+const halfUsable = (member: Member): number => Math.max(0, member.shortPointMm / 2 - keepFromEndMm);
+
+/** Where along the usable inner face (−0.8 to 0.8) a hanger comes nearest to a height. */
+function shareAtHeight(member: Member, height: number, insetMm: number, thicknessMm: number): number {
+  const half = halfUsable(member);
+  const rise = Math.sin(member.inclinationRad);
+  if (half === 0 || Math.abs(rise) < 1e-9) return 0;
+  const alongMm = (height - alongMember(member, 0, insetMm).y) / rise;
+  return Math.min(0.8, Math.max(-0.8, (alongMm - innerShift(member, thicknessMm)) / half));
 }
 
 /** The middle of the inner face, told from the middle of the outer side: not zero where the two ends are bevelled unlike. */
