@@ -1,0 +1,70 @@
+import type { Wall } from '../../../../shared/walls/wall.ts';
+import { Notice } from '../../../components/notice.tsx';
+import { ConflictNotice } from './ledger/conflict-notice.tsx';
+import { FindingsLedger, type ShownFinding } from './ledger/findings-ledger.tsx';
+import { FrameSheet } from './ledger/frame-sheet.tsx';
+import { FramesTable, WholeSizes } from './ledger/frames-table.tsx';
+import { LayoutStage } from './stage/layout-stage.tsx';
+import { StageToolbar } from './stage/stage-toolbar.tsx';
+import type { Designs } from './state/designs.ts';
+import { useEditor } from './state/editor-store.ts';
+import { Tray } from './tray/tray.tsx';
+
+interface Props {
+  wall: Wall;
+  designs: Designs;
+  /** Null while the checks cannot run. */
+  findings: readonly ShownFinding[] | null;
+  readOnly: boolean;
+  /** The window is too narrow to work in, whatever the reader may do. */
+  narrow: boolean;
+}
+
+/** The wall, the tray along its foot and the ledger beside it. Stands inside an EditorContext. */
+export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Props) {
+  const save = useEditor((e) => e.save);
+  return (
+    <div className="flex flex-col gap-3 lg:min-h-0 lg:grow lg:flex-row">
+      <div className="flex min-w-0 grow flex-col gap-3 lg:min-h-0">
+        {narrow ? <Notice>This window is too narrow to work in. You can look at the layout here; to change it, open it on a screen at least 768 px wide.</Notice> : null}
+        {save.kind === 'refused' ? (
+          <Notice kind="stop" live>
+            <p className="font-semibold">Your last changes could not be saved.</p>
+            <p>{save.words} They are kept on this device; undo the last step, or reload the page to try again.</p>
+          </Notice>
+        ) : null}
+        <ConflictNotice />
+        <div className="flex h-[68dvh] min-h-80 flex-col border border-ink-700 lg:h-auto lg:min-h-[26rem] lg:grow">
+          <StageToolbar wall={wall} readOnly={readOnly} />
+          <LayoutStage wall={wall} designs={designs} readOnly={readOnly} />
+          <StatusLine readOnly={readOnly} />
+          {readOnly ? null : <Tray designs={designs} wall={wall} />}
+        </div>
+      </div>
+      <aside aria-label="Ledger" className="flex shrink-0 flex-col gap-4 lg:w-96 lg:overflow-y-auto lg:pr-1">
+        {readOnly ? null : <FrameSheet designs={designs} wall={wall} />}
+        <FindingsLedger findings={findings} />
+        <FramesTable designs={designs} />
+        <WholeSizes designs={designs} wall={wall} />
+      </aside>
+    </div>
+  );
+}
+
+/** What was done last, read out; and what the keys do. */
+function StatusLine({ readOnly }: { readOnly: boolean }) {
+  const news = useEditor((e) => e.news);
+  return (
+    <div className="flex flex-wrap justify-between gap-x-4 border-t border-plaster-200 bg-white px-3 py-1 text-sm text-ink-700">
+      <p role="status">
+        {/* The same words twice are news twice. */}
+        <span key={news.count}>{news.words}</span>
+      </p>
+      {readOnly ? null : (
+        <p id="wall-keys" className="max-md:hidden">
+          Arrows nudge, with Shift farther. Delete removes. Wheel: nearer and farther. Space and drag: along the wall.
+        </p>
+      )}
+    </div>
+  );
+}

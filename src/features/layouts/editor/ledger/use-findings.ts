@@ -1,0 +1,28 @@
+import { useDeferredValue, useMemo, useState } from 'react';
+import type { Finding } from '../../../../../shared/findings/finding.ts';
+import { createLedger } from '../../../../../shared/findings/ledger.ts';
+import { usualLimits } from '../../../../../shared/findings/scene.ts';
+import type { HardwareBook } from '../../../../../shared/hardware/hardware-book.ts';
+import type { Pattern } from '../../../../../shared/patterns/pattern.ts';
+import type { Wall } from '../../../../../shared/walls/wall.ts';
+import { useUnits } from '../../../../lib/units.ts';
+import { useEditor } from '../state/editor-store.ts';
+
+interface Needs {
+  wall: Wall;
+  patterns: readonly Pattern[];
+  book: HardwareBook | undefined;
+  changedSinceSigned: boolean;
+}
+
+/** The findings of the bench as it stands, a moment behind the hand; null while the hardware book is missing. */
+export function useFindings({ wall, patterns, book, changedSinceSigned }: Needs): Finding[] | null {
+  const units = useUnits();
+  const bench = useDeferredValue(useEditor((e) => e.bench));
+  const [ledgerOf] = useState(createLedger);
+  const limits = useMemo(() => ({ ...usualLimits, units }), [units]);
+  return useMemo(
+    () => (book ? ledgerOf({ wall, sheet: bench.sheet, frames: bench.frames, patterns, book, limits, changedSinceSigned }).findings : null),
+    [ledgerOf, wall, bench, patterns, book, limits, changedSinceSigned],
+  );
+}

@@ -1,0 +1,119 @@
+import type Konva from 'konva';
+import { useCallback, useMemo } from 'react';
+import { Layer, Shape } from 'react-konva';
+import { placedAll, type Placement, type Polygon } from '../../../../../shared/geometry/polygon.ts';
+import { shadowDrawing, wallDrawing } from '../../../../../shared/layouts/drawing.ts';
+import type { Frame } from '../../../../../shared/layouts/layout.ts';
+import type { Wall } from '../../../../../shared/walls/wall.ts';
+import { colours } from '../../../../../tailwind.config.ts';
+import { type Designs, type ReadyPattern, wallOutline } from '../state/designs.ts';
+import { useEditor } from '../state/editor-store.ts';
+import { draw, drawPicture, write } from './canvas-pen.ts';
+import { layerPlace } from './view.ts';
+
+/** Every layer draws in wall mm, y up, by one shape; hits are found on the bench, never on the canvas. */
+function WallLayer({ paint }: { paint: (context: CanvasRenderingContext2D, pxPerMm: number) => void }) {
+  const view = useEditor((e) => e.view);
+  const scene = useCallback((context: Konva.Context, shape: Konva.Shape) => paint(context._context, shape.getAbsoluteScale().x), [paint]);
+  return (
+    <Layer listening={false} {...layerPlace(view)}>
+      <Shape sceneFunc={scene} perfectDrawEnabled={false} />
+    </Layer>
+  );
+}
+
+type Elevation = NonNullable<NonNullable<Wall['photo']>['elevation']>;
+
+/** The wall's face and its photo: changes when a photo arrives. */
+export function GroundLayer({ wall, picture, image }: { wall: Wall; picture: Elevation | null; image: HTMLImageElement | null }) {
+  const ground = useMemo(() => wallDrawing(wall, null).ground, [wall]);
+  const paint = useCallback(
+    (context: CanvasRenderingContext2D, pxPerMm: number) => {
+      draw(context, ground, pxPerMm);
+      if (picture && image) {
+        drawPicture(context, image, picture);
+        draw(context, ground.slice(-1), pxPerMm);
+      }
+    },
+    [ground, picture, image],
+  );
+  return <WallLayer paint={paint} />;
+}
+
+/** Studs and obstructions: change when the wall is measured again. */
+export function SiteLayer({ wall }: { wall: Wall }) {
+  const drawn = useMemo(() => wallDrawing(wall, null), [wall]);
+  const showStuds = useEditor((e) => e.show.studs);
+  const paint = useCallback(
+    (context: CanvasRenderingContext2D, pxPerMm: number) => {
+      if (showStuds) draw(context, drawn.studs, pxPerMm);
+      draw(context, drawn.obstructions, pxPerMm);
+    },
+    [drawn, showStuds],
+  );
+  return <WallLayer paint={paint} />;
+}
+
+const shadows = new WeakMap<Polygon, ReturnType<typeof shadowDrawing>>();
+const labelPx = 14;
+
+function paintFrame(context: CanvasRenderingContext2D, pattern: ReadyPattern, at: Placement, pxPerMm: number, hangers: boolean): void {
+  context.save();
+  context.translate(at.xMm, at.yMm);
+  context.rotate(at.turnRad);
+  const drawing = pattern.drawing(at.flipped);
+  draw(context, drawing.body, pxPerMm);
+  if (hangers) draw(context, drawing.hangers, pxPerMm);
+  context.restore();
+}
+
+function paintShadow(context: CanvasRenderingContext2D, pattern: ReadyPattern, outline: Polygon, pxPerMm: number): void {
+  let shadow = shadows.get(outline);
+  if (!shadow) shadows.set(outline, (shadow = shadowDrawing(pattern.design, outline)));
+  draw(context, shadow, pxPerMm);
+}
+
+const none: ReadonlySet<string> = new Set();
+
+/** The frames that stay: changes when the bench does, not while one is carried. */
+export function FramesLayer({ designs }: { designs: Designs }) {
+  const frames = useEditor((e) => e.bench.frames);
+  const hangers = useEditor((e) => e.show.hangers);
+  const heldKey = useEditor((e) => (e.hand ? [...e.hand.placements.keys()].join(' ') : ''));
+  const paint = useCallback(
+    (context: CanvasRenderingContext2D, pxPerMm: number) => {
+      const held = heldKey ? new Set(heldKey.split(' ')) : none;
+      const still = frames.filter((f) => !held.has(f.id) && designs.has(f.patternId));
+      for (const frame of still) paintShadow(context, designs.get(frame.patternId)!, wallOutline(frame, designs)!, pxPerMm);
+      for (const frame of still) paintFrame(context, designs.get(frame.patternId)!, frame, pxPerMm, hangers);
+      for (const frame of still) paintLabel(context, frame, pxPerMm);
+    },
+    [frames, designs, hangers, heldKey],
+  );
+  return <WallLayer paint={paint} />;
+}
+
+function paintLabel(context: CanvasRenderingContext2D, frame: Frame, pxPerMm: number): void {
+  if (frame.label) write(context, frame.label, frame.xMm, frame.yMm, labelPx / pxPerMm, colours.ink[900], colours.plaster[50]);
+}
+
+/** What the hand holds: changes with every move of the pointer. */
+export function HandLayer({ designs }: { designs: Designs }) {
+  const hand = useEditor((e) => e.hand);
+  const frames = useEditor((e) => e.bench.frames);
+  const hangers = useEditor((e) => e.show.hangers);
+  const paint = useCallback(
+    (context: CanvasRenderingContext2D, pxPerMm: number) => {
+      if (!hand) return;
+      const held: [ReadyPattern | undefined, Placement][] = [...hand.placements].map(([id, at]) => [designs.get(frames.find((f) => f.id === id)?.patternId ?? ''), at]);
+      if (hand.fromTray?.at) held.push([designs.get(hand.fromTray.patternId), hand.fromTray.at]);
+      for (const [pattern, at] of held) {
+        if (!pattern) continue;
+        paintShadow(context, pattern, placedAll(pattern.outline, at), pxPerMm);
+        paintFrame(context, pattern, at, pxPerMm, hangers);
+      }
+    },
+    [hand, frames, designs, hangers],
+  );
+  return <WallLayer paint={paint} />;
+}

@@ -1,0 +1,71 @@
+import { createContext, useContext } from 'react';
+import { createStore, useStore, type StoreApi } from 'zustand';
+import type { Placement } from '../../../../../shared/geometry/polygon.ts';
+import type { Edit, Layout } from '../../../../../shared/layouts/layout.ts';
+import type { Snap } from '../../../../../shared/layouts/snap.ts';
+import type { SaveState } from '../saver/save-state.ts';
+import { fitted, type View } from '../stage/view.ts';
+import { reduce, startState, type EditorAction, type EditorState } from './editor-state.ts';
+
+/** What the hand holds between press and release: nothing of it is on the bench yet. */
+export interface Hand {
+  /** Frames held, where the hand has them now. */
+  placements: ReadonlyMap<string, Placement>;
+  /** A pattern on its way from the tray; null while it is not over the wall. */
+  fromTray: { patternId: string; at: Placement | null } | null;
+  snap: Snap | null;
+}
+
+/** Everything the editor holds: the draft, and beside it what is only of the moment. */
+export interface Editor extends EditorState {
+  view: View;
+  size: { width: number; height: number };
+  hand: Hand | null;
+  save: SaveState;
+  show: { studs: boolean; hangers: boolean };
+  /** Whether a held frame snaps to its neighbours. */
+  snapping: boolean;
+  /** Where the wall is drawn; gestures that begin elsewhere find it here. */
+  stage: HTMLElement | null;
+}
+
+export interface EditorStore extends StoreApi<Editor> {
+  dispatch: (action: EditorAction) => void;
+  /** Does something now: edits under the words the undo list tells. */
+  act: (words: string, edits: Edit[], more?: { select?: readonly string[]; run?: string }) => void;
+  settle: (choose: 'mine' | 'theirs') => void;
+}
+
+/** A store for one layout, from first load to leaving the page. */
+export function createEditorStore(layout: Layout): EditorStore {
+  const store = createStore<Editor>(() => ({
+    ...startState(layout),
+    view: fitted({ widthMm: 1000, heightMm: 1000 }, { width: 100, height: 100 }),
+    size: { width: 0, height: 0 },
+    hand: null,
+    save: { kind: 'saved' },
+    show: { studs: true, hangers: true },
+    snapping: true,
+    stage: null,
+  }));
+  const dispatch = (action: EditorAction) => store.setState((editor) => ({ ...editor, ...reduce(editor, action) }));
+  return Object.assign(store, {
+    dispatch,
+    act: (words: string, edits: Edit[], more: { select?: readonly string[]; run?: string } = {}) => dispatch({ kind: 'do', words, edits, atMs: performance.now(), ...more }),
+    settle: (choose: 'mine' | 'theirs') => dispatch({ kind: 'settle', choose, atMs: performance.now() }),
+  });
+}
+
+export const EditorContext = createContext<EditorStore | null>(null);
+
+/** The store of the layout on this page. */
+export function useEditorStore(): EditorStore {
+  const store = useContext(EditorContext);
+  if (!store) throw new Error('The editor stands outside its page.');
+  return store;
+}
+
+/** A part of the editor's state; renders again only when that part changes. */
+export function useEditor<T>(part: (editor: Editor) => T): T {
+  return useStore(useEditorStore(), part);
+}
