@@ -61,3 +61,18 @@ export function boundsOf(outline: Outline): Rectangle {
 export const usualClearanceMm: Record<Obstruction['kind'], number> = {
   opening: 25, switch: 50, outlet: 50, thermostat: 100, vent: 100, radiator: 150, trim: 10, furniture: 25, pipe: 50, cable: 50,
 };
+
+/** New studs nearer than this to one that was found are taken to be that one, mm. */
+const sameStudMm = 100;
+
+/**
+ * Lays studs at `centresMm` beside those already there: what only a spacing promised is given up, what was found stays,
+ * and no promised stud is set where a found one stands. `newId` makes identifiers.
+ */
+export function laidBySpacing(studs: readonly Stud[], centresMm: readonly number[], widthMm: number, newId: () => string): Stud[] {
+  const found = studs.filter((s) => s.foundBy !== 'spacing');
+  const promised = centresMm
+    .filter((x) => !found.some((s) => Math.abs(s.xMm - x) < sameStudMm))
+    .map((xMm): Stud => ({ id: newId(), xMm, widthMm, foundBy: 'spacing', uncertaintyMm: usualUncertaintyMm.spacing }));
+  return inOrder([...found, ...promised]);
+}

@@ -1,0 +1,65 @@
+import { useState } from 'react';
+import { LengthField } from '../../components/length-field.tsx';
+import { Table, Td, Th } from '../../components/table.tsx';
+import { cornerNames, rectangleOf, withRectangle, type MarkDraft, type TapeRectangle } from './marks-draft.ts';
+
+interface Props {
+  marks: readonly MarkDraft[];
+  onChange: (marks: MarkDraft[]) => void;
+}
+
+/** Where the marks are on the wall: the corners of a taped rectangle, or each typed by itself. */
+export function MarkPositions({ marks, onChange }: Props) {
+  const [typed, setTyped] = useState<TapeRectangle | null>(null);
+  // What was typed holds while the marks still stand where it put them; half typed, the marks could not tell it back.
+  const rectangle = typed && samePlaces(withRectangle(marks, typed), marks) ? typed : rectangleOf(marks);
+  const setSide = (change: Partial<TapeRectangle>) => {
+    const next = { ...rectangle, ...change };
+    setTyped(next);
+    onChange(withRectangle(marks, next));
+  };
+  const setMark = (index: number, change: Partial<MarkDraft>) => onChange(marks.map((m, i) => (i === index ? { ...m, ...change } : m)));
+
+  return (
+    <div className="grid gap-4">
+      <fieldset>
+        <legend className="mb-2 font-semibold text-ink-900">Marks on the corners of a rectangle</legend>
+        <p className="mb-3 text-sm text-ink-700">Tape a level, square rectangle on the wall: equal diagonals prove it square.</p>
+        <div className="grid grid-cols-2 gap-3">
+          <LengthField label="Rectangle’s width" value={rectangle.widthMm} onChange={(widthMm) => setSide({ widthMm })} />
+          <LengthField label="Rectangle’s height" value={rectangle.heightMm} onChange={(heightMm) => setSide({ heightMm })} />
+          <LengthField label="Its left side from the wall’s left end" value={rectangle.leftMm} onChange={(leftMm) => setSide({ leftMm })} />
+          <LengthField label="Its foot above the floor" value={rectangle.bottomMm} onChange={(bottomMm) => setSide({ bottomMm })} />
+        </div>
+      </fieldset>
+      <Table caption="Positions of the marks on the wall">
+        <thead>
+          <tr>
+            <Th>Mark</Th>
+            <Th>From the left</Th>
+            <Th>Above the floor</Th>
+          </tr>
+        </thead>
+        <tbody>
+          {marks.map((mark, i) => (
+            <tr key={cornerNames[i] ?? i}>
+              <Th scope="row">
+                {i + 1} <span className="block text-sm font-normal text-ink-700">{cornerNames[i]}</span>
+              </Th>
+              <Td className="min-w-28">
+                <LengthField className="[&>label]:sr-only" label={`Mark ${i + 1} from the left`} value={mark.xMm} onChange={(xMm) => setMark(i, { xMm })} />
+              </Td>
+              <Td className="min-w-28">
+                <LengthField className="[&>label]:sr-only" label={`Mark ${i + 1} above the floor`} value={mark.yMm} onChange={(yMm) => setMark(i, { yMm })} />
+              </Td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+    </div>
+  );
+}
+
+function samePlaces(a: readonly MarkDraft[], b: readonly MarkDraft[]): boolean {
+  return a.every((m, i) => Object.is(m.xMm, b[i]?.xMm) && Object.is(m.yMm, b[i]?.yMm));
+}
