@@ -20,7 +20,7 @@ async function main(config: Config): Promise<void> {
   const outbox = createOutbox(outboxRepository(data), { smtpUrl, from: config.mailFrom, clock, log });
   const pool = createPool();
   const { app, rooms } = createApp({ config, data, log, outbox, pool, fakeMail, clock, demo: config.demo ? demoAccounts : null });
-  if (config.demo && !(await rooms.people.anyShop())) await seedDemo(data, rooms, clock);
+  if (config.demo) await seedDemo(data, rooms);
 
   const server = app.listen(config.port, config.host, (error?: Error) => {
     if (error) {

@@ -29,9 +29,6 @@ export function peopleRepository(data: DataSource) {
     async usersOf(shopId: string): Promise<UserRow[]> {
       return users.find({ where: { shopId }, order: { createdAt: 'ASC', id: 'ASC' } });
     },
-    async anyShop(): Promise<boolean> {
-      return (await data.getRepository(ShopRow).count()) > 0;
-    },
     async addSession(session: SessionRow): Promise<void> {
       await sessions.insert(session);
     },

@@ -117,8 +117,6 @@ export function peopleService(people: PeopleRepository, clock: () => Date, furni
       const withShop = owner && (await people.userById(owner.id));
       return { name: withShop?.shop.name ?? '', units: withShop?.shop.units ?? 'in', replyTo: owner?.email ?? null };
     },
-
-    anyShop: () => people.anyShop(),
   };
 }
 export type PeopleService = ReturnType<typeof peopleService>;

@@ -116,7 +116,8 @@ describe('two shops', () => {
     for (const route of Object.keys(table).filter((r) => /:(job|wall|layout|pattern|revision|link|hardware)Id/.test(r) && !r.includes('portal'))) {
       const [method, path] = route.split(' ') as ['get', string];
       const address = path.replace(/:([A-Za-z]+)/g, (_, name: string) => own[name] ?? randomUUID());
-      const reply = await theirs.browser[method](address).send(method === 'get' ? undefined : bodies[route]);
+      const request = theirs.browser[method](address);
+      const reply = await (path.endsWith('/photos') ? request.attach('file', Buffer.from('no picture'), 'wall.jpg') : request.send(method === 'get' ? undefined : bodies[route]));
       expect(`${route} ${reply.status}`).toBe(`${route} 404`);
     }
     expect((await theirs.browser.get('/api/jobs')).body).toEqual([]);
