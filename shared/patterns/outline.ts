@@ -23,6 +23,15 @@ const leastBendRad = Math.PI / 360;
  * level where the shape has a level side. Throws a ShapeError where the shape does not close, is concave, crosses itself or has no body.
  */
 export function outlineOf(shape: Shape): Point[] {
+  let known = outlines.get(shape);
+  if (!known) outlines.set(shape, (known = freshOutline(shape)));
+  return known;
+}
+
+/** Shapes are never changed in place, and every check of a moving frame asks for its outline again. */
+const outlines = new WeakMap<Shape, Point[]>();
+
+function freshOutline(shape: Shape): Point[] {
   const corners = shape.kind === 'free' ? freeCorners(shape.verticesMm) : readyCorners(shape);
   const centre = centroid(corners);
   return lowestSideFirst(moved(corners, -centre.x, -centre.y));
