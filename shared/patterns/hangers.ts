@@ -17,11 +17,12 @@ type HangerPlace = Pick<Hanger, 'member' | 'alongMm' | 'insetMm'>;
 
 /** A place told along a member, in the pattern's own coordinates, mm. Throws a RangeError where the frame has no such member. */
 export function hangerPosition(design: Pick<PatternDesign, 'shape' | 'thicknessMm'>, hanger: HangerPlace): Point {
-  return alongMember(memberOf(design, hanger.member), hanger.alongMm, hanger.insetMm);
+  const members = membersOf(outlineOf(design.shape), design.thicknessMm);
+  return alongMember(memberOf(members, hanger.member), hanger.alongMm, hanger.insetMm);
 }
 
-function memberOf({ shape, thicknessMm }: Pick<PatternDesign, 'shape' | 'thicknessMm'>, index: number): Member {
-  const member = membersOf(outlineOf(shape), thicknessMm)[index];
+function memberOf(members: readonly Member[], index: number): Member {
+  const member = members[index];
   if (!member) throw new RangeError(`member: this frame has no member ${index + 1}.`);
   return member;
 }
@@ -48,8 +49,9 @@ export function placedMembers(frame: Placement, design: Pick<PatternDesign, 'sha
 
 /** The hangers of a frame on the wall, in the design's order. */
 export function placedHangers(frame: Placement, design: Pick<PatternDesign, 'shape' | 'thicknessMm' | 'hangers'>): PlacedHanger[] {
+  const members = membersOf(outlineOf(design.shape), design.thicknessMm);
   return design.hangers.map((hanger) => {
-    const member = memberOf(design, hanger.member);
+    const member = memberOf(members, hanger.member);
     const at = (offset: number): Point => placed(alongMember(member, hanger.alongMm + offset, hanger.insetMm), frame);
     const [low, high] = hanger.allowanceMm;
     return { id: hanger.id, ...at(0), slide: { from: at(low), to: at(high) } };

@@ -61,8 +61,10 @@ export function formatFigure(of: Pick<FigureInput, 'value' | 'unit'>, units: Len
 /** 1 lbf/in in N/mm. */
 const poundForcePerInch = NEWTON_PER_POUND_FORCE / MM_PER_INCH;
 
-/** Lengths under a tenth of an inch (wood movement, play) would vanish in thirty-seconds: decimals instead. */
+/** Lengths under a tenth of an inch (wood movement, play) would vanish in thirty-seconds: decimals instead, save where they fall on the rule. */
 function smallLength(mm: number, units: LengthUnits): string | null {
-  if (mm === 0 || Math.abs(mm) >= 2.5) return null;
+  const thirtySeconds = (mm / MM_PER_INCH) * 32;
+  const onTheRule = units === 'in' && Math.abs(thirtySeconds - Math.round(thirtySeconds)) < 1e-6;
+  if (mm === 0 || Math.abs(mm) >= 2.5 || onTheRule) return null;
   return units === 'in' ? `${tidyNumber(mm / MM_PER_INCH, 3)}"` : `${tidyNumber(mm, 2)} mm`;
 }

@@ -59,6 +59,7 @@ describe('masses, loads and angles', () => {
   it('figures follow the shop’s units, and small ones do not vanish', () => {
     expect(formatFigure({ value: 719.5, unit: 'Pa' }, 'in')).toBe('15 lbf/ft²');
     expect(formatFigure({ value: 0.13, unit: 'mm' }, 'in')).toBe('0.005"');
+    expect(formatFigure({ value: 25.4 / 16, unit: 'mm' }, 'in')).toBe('1/16"');
     expect(formatFigure({ value: 705.6, unit: 'kg/m³' }, 'in')).toBe('44 lb/ft³');
     expect(formatFigure({ value: 0.00365, unit: '' }, 'mm')).toBe('0.00365');
     expect(formatFigure({ value: 6.894757, unit: 'N/mm²' }, 'in')).toBe('1000 psi');
