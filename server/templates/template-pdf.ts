@@ -33,7 +33,8 @@ export async function drawPdf(pages: Page[], facts: PdfFacts): Promise<Uint8Arra
     }
     await drawAll(sheet, page.items, fonts);
   }
-  return document.save();
+  // In one go: this runs in a thread of its own, where nobody waits for a turn between.
+  return document.save({ objectsPerTick: Infinity });
 }
 
 function describe(document: PDFDocument, facts: PdfFacts): void {

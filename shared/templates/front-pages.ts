@@ -1,6 +1,6 @@
 import { formatLength } from '../units/length.ts';
 import { line, rectangle, text, type Page, type Primitive } from './drawing.ts';
-import { cautions, proveScale, tapeUp, type Words } from './front-words.ts';
+import { cautions, proveScale, tapeUp, toBring, type Words } from './front-words.ts';
 import { drillText, hangOrder, longestSpan, type Datums } from './hang-order.ts';
 import { paperSizes } from './papers.ts';
 import { sheetMap, wallLocator } from './sheet-map.ts';
@@ -86,16 +86,23 @@ function orderRows(input: TemplateInput): OrderRow[] {
   });
 }
 
+/** The table over as many pages as it takes; what to bring stands under its end, or on a page of its own where there is no room. */
 function orderPages(input: TemplateInput, format: SheetFormat): Page[] {
   const { live } = format;
+  const top = live.y + live.height;
   const rows = orderRows(input);
   const room = Math.floor((live.height - 26) / rowMm);
-  const pages: OrderRow[][] = [];
-  for (let i = 0; i < rows.length; i += room) pages.push(rows.slice(i, i + room));
-  return pages.map((some, i) => {
-    const name = pages.length === 1 ? 'Hang order' : `Hang order ${i + 1} of ${pages.length}`;
-    return page(input, format, name, orderTable(some, name, live.x, live.y + live.height, live.width - 2));
+  const parts: OrderRow[][] = [];
+  for (let i = 0; i < rows.length; i += room) parts.push(rows.slice(i, i + room));
+  const pages = parts.map((part, i) => {
+    const name = parts.length === 1 ? 'Hang order' : `Hang order ${i + 1} of ${parts.length}`;
+    return { name, items: orderTable(part, name, live.x, top, live.width - 2) };
   });
+  const under = block(toBring(input), { x: live.x, y: top - 19.4 - (parts.at(-1)?.length ?? 0) * rowMm - 10 }, live.width - 2);
+  const last = pages.at(-1);
+  if (last && under.end > live.y) last.items.push(...under.items);
+  else if (last) pages.push({ name: 'To bring', items: block(toBring(input), { x: live.x, y: top - 8 }, live.width - 2).items });
+  return pages.map(({ name, items }) => page(input, format, name, items));
 }
 
 function orderTable(rows: OrderRow[], name: string, x: number, top: number, width: number): Primitive[] {

@@ -1,5 +1,5 @@
 import { formatLength } from '../units/length.ts';
-import type { Datums, longestSpan } from './hang-order.ts';
+import { hardwareCounts, type Datums, type longestSpan } from './hang-order.ts';
 import { signature } from './sheet-title.ts';
 import type { TemplateInput } from './template-input.ts';
 
@@ -55,6 +55,23 @@ export function cautions(input: TemplateInput): Words {
       'Glass and mirrors: gloves, edges protected, two people for large ones. Never hang glass by the glass.',
       'Screws and anchors carry what their makers state in this wall, not more. Makers’ instructions, local codes and licensed practice come before anything on this paper.',
       'The paper places the screws. It cannot see what is in the wall.',
+    ],
+  };
+}
+
+const kindsShown = 24;
+
+/** What hangs it all, counted; the tools that the template itself asks for. */
+export function toBring(input: TemplateInput): Words {
+  const counts = hardwareCounts(input.frames);
+  const more = counts.length - kindsShown;
+  return {
+    heading: 'To bring',
+    numbered: false,
+    paragraphs: [
+      ...counts.slice(0, kindsShown).map(({ hardware, count }) => `${count} × ${hardware}`),
+      ...(more > 0 ? [`and ${more} more ${more === 1 ? 'kind' : 'kinds'}: see the hang order`] : []),
+      'Steel rule, tape, level or laser, stud and cable detector, awl, masking tape, scissors or knife with straight-edge, drill and the bits of the hang order.',
     ],
   };
 }

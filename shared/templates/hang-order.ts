@@ -73,3 +73,10 @@ export function chooseDatums(input: Pick<TemplateInput, 'frames' | 'units'>): Da
   };
   return { levelMm: middle('y'), plumbMm: middle('x') };
 }
+
+/** How many of each hardware the screws ask for, most first. */
+export function hardwareCounts(frames: TemplateFrame[]): { hardware: string; count: number }[] {
+  const counts = new Map<string, number>();
+  for (const { hardware } of frames.flatMap((f) => f.hangers)) if (hardware !== '') counts.set(hardware, (counts.get(hardware) ?? 0) + 1);
+  return [...counts].map(([hardware, count]) => ({ hardware, count })).sort((a, b) => b.count - a.count);
+}

@@ -107,7 +107,7 @@ function bestGrid(ink: Ink, wall: { widthMm: number; heightMm: number }, wish: S
 /** Raster of places: fine enough to matter, coarse enough that all can be tried. */
 function placesApart(units: 'in' | 'mm', shown: Point, segments: number): number {
   const rasters = units === 'mm' ? [1, 2, 5, 10, 20] : [3.175, 6.35, 12.7, 25.4];
-  const affordable = 3e6 / Math.max(1, segments);
+  const affordable = 2e6 / Math.max(1, segments);
   return rasters.find((raster) => (shown.x / raster) * (shown.y / raster) <= Math.max(400, affordable)) ?? rasters.at(-1)!;
 }
 
