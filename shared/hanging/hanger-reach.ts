@@ -35,102 +35,128 @@ export interface SeekPlace {
 export const parts = 1e6;
 export const whole = (mm: number): number => Math.round(mm * parts);
 
-/** One hanger against all zones, in millionths: zone k is met by shifts from `starts[k]` to `ends[k]`, best in the middle by `halves[k]`. */
-export class Reach {
-  readonly hanger: SeekHanger;
-  readonly zones: readonly StudZone[];
-  readonly starts: number[] = [];
-  readonly ends: number[] = [];
-  readonly halves: number[] = [];
-  private readonly at: number[] = [];
-  private readonly lowest: number;
-  private readonly highest: number;
+/** All studs of a wall, in millionths, left to right. */
+export class Studs {
+  readonly ids: readonly string[];
+  readonly at: Float64Array;
+  readonly half: Float64Array;
 
-  constructor(hanger: SeekHanger, zones: readonly StudZone[]) {
-    this.hanger = hanger;
-    this.zones = zones;
-    this.lowest = whole(hanger.xMm + hanger.slide[0]);
-    this.highest = whole(hanger.xMm + hanger.slide[1]);
-    zones.forEach((zone, k) => {
-      const half = whole(zone.halfMm - hanger.edgeMm);
-      // Too narrow for this screw: no place in it is sure, but it can still be the nearest.
-      this.halves[k] = half;
-      this.at[k] = whole(zone.xMm);
-      this.starts[k] = this.at[k] - half - this.highest;
-      this.ends[k] = this.at[k] + half - this.lowest;
-    });
+  constructor(zones: readonly StudZone[]) {
+    const sorted = [...zones].sort((a, b) => a.xMm - b.xMm);
+    this.ids = sorted.map((z) => z.studId);
+    this.at = Float64Array.from(sorted, (z) => whole(z.xMm));
+    this.half = Float64Array.from(sorted, (z) => whole(z.halfMm));
   }
 
-  /** The same hanger nailed to its place. */
-  still(): Reach {
-    return new Reach({ ...this.hanger, slide: [0, 0] }, this.zones);
+  get count(): number {
+    return this.at.length;
+  }
+}
+
+/** One hanger against all studs, in millionths: stud k is met by shifts from start(k) to end(k), best about the middle, by half(k). */
+export class Reach {
+  readonly hanger: SeekHanger;
+  private readonly studs: Studs;
+  private readonly edge: number;
+  private readonly x: number;
+  private readonly down: number;
+  private readonly up: number;
+
+  constructor(hanger: SeekHanger, studs: Studs) {
+    this.hanger = hanger;
+    this.studs = studs;
+    this.edge = whole(hanger.edgeMm);
+    this.x = whole(hanger.xMm);
+    this.down = whole(hanger.slide[0]);
+    this.up = whole(hanger.slide[1]);
+  }
+
+  get studCount(): number {
+    return this.studs.count;
+  }
+
+  /** Half the width that counts for this screw; below zero no place in the stud is sure, but it can still be the nearest. */
+  half(k: number): number {
+    return (this.studs.half[k] as number) - this.edge;
+  }
+
+  start(k: number): number {
+    return (this.studs.at[k] as number) - this.half(k) - this.x - this.up;
+  }
+
+  end(k: number): number {
+    return (this.studs.at[k] as number) + this.half(k) - this.x - this.down;
   }
 
   /** Shifts within the allowed ones that bring it into a stud, merged. */
   ranges(allowed: readonly Range[]): Range[] {
     const first = allowed[0]?.[0] ?? Infinity;
     const last = allowed[allowed.length - 1]?.[1] ?? -Infinity;
-    const found: Range[] = [];
-    for (let k = 0; k < this.halves.length; k++) {
-      const from = this.starts[k] as number;
-      const to = this.ends[k] as number;
-      if ((this.halves[k] as number) < 0 || to < first || from > last) continue;
+    const found: [number, number][] = [];
+    let inOrder = true;
+    for (let k = 0; k < this.studs.count; k++) {
+      const from = this.start(k);
+      const to = this.end(k);
+      if (this.half(k) < 0 || to < first || from > last) continue;
+      const before = found[found.length - 1];
+      // Studs stand left to right, so nearly always one range follows the other.
+      if (before && from <= before[1]) inOrder = false;
       found.push([from, to]);
     }
-    return found.length < 2 ? found : mergeRanges(found);
+    return inOrder ? found : mergeRanges(found);
   }
 
-  /** Margin (millionths) in zone k after the best slide. */
+  /** Margin in stud k after the best slide. */
   margin(k: number, shift: number): number {
-    return Math.min(this.halves[k] as number, shift - (this.starts[k] as number), (this.ends[k] as number) - shift);
+    return this.half(k) - Math.max(0, this.start(k) + this.half(k) - shift, shift - this.end(k) + this.half(k));
   }
 
-  /** The zone with the greatest margin; zone −1 on a wall without studs. */
-  best(shift: number): { zone: number; margin: number } {
-    let zone = -1;
+  /** The stud with the greatest margin, the one that needs the least slide among equals; −1 on a wall without studs. */
+  best(shift: number): { stud: number; margin: number } {
+    let stud = -1;
     let margin = -Infinity;
-    for (let k = 0; k < this.halves.length; k++) {
+    for (let k = 0; k < this.studs.count; k++) {
       const here = this.margin(k, shift);
-      if (here > margin || (here === margin && this.reachFor(k, shift) < this.reachFor(zone, shift))) {
+      if (here > margin || (here === margin && Math.abs(this.slide(k, shift)) < Math.abs(this.slide(stud, shift)))) {
         margin = here;
-        zone = k;
+        stud = k;
       }
     }
-    return { zone, margin };
+    return { stud, margin };
   }
 
-  /** How far it must slide to stand best in zone k. */
-  private reachFor(k: number, shift: number): number {
-    return Math.abs(this.slideFor(k, shift));
+  /** Margin as drawn: no shift and no slide. */
+  marginAsDrawn(): number {
+    let margin = -Infinity;
+    for (let k = 0; k < this.studs.count; k++) margin = Math.max(margin, this.half(k) - Math.abs((this.studs.at[k] as number) - this.x));
+    return margin;
   }
 
-  private slideFor(k: number, shift: number): number {
-    const x = whole(this.hanger.xMm);
-    const wanted = (this.at[k] as number) - x - shift;
-    return Math.min(Math.max(wanted, this.lowest - x), this.highest - x);
+  /** Slide that brings it nearest to the centre of stud k. */
+  private slide(k: number, shift: number): number {
+    return Math.min(Math.max((this.studs.at[k] as number) - this.x - shift, this.down), this.up);
   }
 
   place(shift: number): SeekPlace {
     const { id, frameId } = this.hanger;
-    const { zone, margin } = this.best(shift);
-    const x = whole(this.hanger.xMm);
-    const met = zone >= 0 && margin >= 0;
+    const { stud, margin } = this.best(shift);
+    const met = stud >= 0 && margin >= 0;
     // A hanger that meets no stud keeps its place on the frame: an anchor is as good anywhere.
-    const slide = met ? this.slideFor(zone, shift) : 0;
+    const slide = met ? this.slide(stud, shift) : 0;
     return {
-      id, frameId, studId: met ? (this.zones[zone]?.studId ?? null) : null, slideMm: slide / parts, xMm: (x + shift + slide) / parts,
-      marginMm: zone < 0 ? null : margin / parts, words: this.words(zone, margin, slide, shift),
+      id, frameId, studId: met ? (this.studs.ids[stud] ?? null) : null, slideMm: slide / parts, xMm: (this.x + shift + slide) / parts,
+      marginMm: stud < 0 ? null : margin / parts, words: this.words(stud, margin, slide, shift),
     };
   }
 
-  private words(zone: number, margin: number, slide: number, shift: number): string {
-    if (zone < 0) return 'No studs are marked on this wall.';
+  private words(stud: number, margin: number, slide: number, shift: number): string {
+    if (stud < 0) return 'No studs are marked on this wall.';
     const mm = (v: number) => `${Math.round(Math.abs(v) / (parts / 10)) / 10} mm`;
     if (margin < 0) {
-      if ((this.halves[zone] as number) < 0) return 'The nearest stud is not known well enough for so thick a screw.';
+      if (this.half(stud) < 0) return 'The nearest stud is not known well enough for so thick a screw.';
       return `Misses the nearest stud by ${mm(margin)} even when slid as far as it may.`;
     }
-    const centred = this.slideFor(zone, shift) === (this.at[zone] as number) - whole(this.hanger.xMm) - shift;
+    const centred = this.x + shift + slide === this.studs.at[stud];
     const how = slide === 0 ? 'In the stud as it is' : `In the stud when slid ${mm(slide)} to the ${slide > 0 ? 'right' : 'left'}`;
     return centred ? `${how}, on its centre.` : `${how}, ${mm(margin)} to spare; its allowance ends there.`;
   }

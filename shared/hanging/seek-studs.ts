@@ -1,6 +1,6 @@
-import { parts, Reach, whole, type SeekHanger, type SeekPlace, type StudZone } from './hanger-reach.ts';
+import { parts, Reach, Studs, whole, type SeekHanger, type SeekPlace, type StudZone } from './hanger-reach.ts';
 import { marginPeak } from './margin-peak.ts';
-import { bestCounts, mergeRanges, type Range } from './shift-sweep.ts';
+import { bestCounts, mergeRanges, type FrameNeed, type Range } from './shift-sweep.ts';
 
 export interface SeekInput {
   hangers: readonly SeekHanger[];
@@ -39,15 +39,15 @@ export interface SeekResult {
  * margin is piecewise linear. Of two equal shifts to either side the one to the right is taken.
  */
 export function seekStuds(input: SeekInput): SeekResult {
-  const zones = [...input.zones].sort((a, b) => a.xMm - b.xMm);
+  const studs = new Studs(input.zones);
   const allowed = mergeRanges(input.allowed.map(([from, to]): Range => [whole(from), whole(to)]).filter(([from, to]) => from <= to));
-  const hangers = input.hangers.map((h) => new Reach(h, zones));
+  const hangers = input.hangers.map((h) => new Reach(h, studs));
   const frames = framesOf(hangers, input.neededByFrame ?? {});
-  const today = scoreAt(hangers.map((h) => h.still()), frames, 0);
-  const slidOnly = scoreAt(hangers, frames, 0);
+  const today = scoreOf(hangers.map((h) => h.marginAsDrawn()), frames);
+  const slidOnly = scoreOf(hangers.map((h) => h.best(0).margin), frames);
 
   const spans = hangers.map((h) => h.ranges(allowed));
-  const best = bestCounts(spans, frames.map((f) => ({ members: f.members, needed: f.needed })), allowed);
+  const best = bestCounts(spans, frames, allowed);
   if (best.length === 0) return { shiftMm: null, score: null, places: [], ties: [], today, slidOnly };
 
   let peak = -Infinity;
@@ -63,7 +63,7 @@ export function seekStuds(input: SeekInput): SeekResult {
   const shift = shortest(ties);
   return {
     shiftMm: shift / parts,
-    score: scoreAt(hangers, frames, shift),
+    score: scoreOf(hangers.map((h) => h.best(shift).margin), frames),
     places: hangers.map((h) => h.place(shift)),
     ties: ties.map(([from, to]) => ({ fromMm: from / parts, toMm: to / parts })),
     today,
@@ -71,12 +71,7 @@ export function seekStuds(input: SeekInput): SeekResult {
   };
 }
 
-interface FrameGroup {
-  members: number[];
-  needed: number;
-}
-
-function framesOf(hangers: readonly Reach[], needed: Readonly<Record<string, number>>): FrameGroup[] {
+function framesOf(hangers: readonly Reach[], needed: Readonly<Record<string, number>>): FrameNeed[] {
   const byId = new Map<string, number[]>();
   hangers.forEach((h, i) => {
     const members = byId.get(h.hanger.frameId);
@@ -86,14 +81,13 @@ function framesOf(hangers: readonly Reach[], needed: Readonly<Record<string, num
   return [...byId].map(([id, members]) => ({ members, needed: needed[id] ?? members.length }));
 }
 
-function scoreAt(hangers: readonly Reach[], frames: readonly FrameGroup[], shift: number): SeekScore {
-  const margins = hangers.map((h) => h.best(shift).margin);
+function scoreOf(margins: readonly number[], frames: readonly FrameNeed[]): SeekScore {
   const inside = margins.filter((m) => m >= 0);
   return {
     framesHeld: frames.filter((f) => f.members.filter((i) => (margins[i] ?? -1) >= 0).length >= f.needed).length,
     frames: frames.length,
     hangersInStuds: inside.length,
-    hangers: hangers.length,
+    hangers: margins.length,
     leastMarginMm: inside.length === 0 ? null : inside.reduce((a, b) => Math.min(a, b)) / parts,
   };
 }

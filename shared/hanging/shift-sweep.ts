@@ -84,7 +84,7 @@ function ends(spans: readonly (readonly Range[])[], end: 0 | 1): Float64Array {
 function heldRanges(members: readonly (readonly Range[])[], needed: number): Range[] {
   if (needed <= 0) return [[-Infinity, Infinity]];
   if (needed > members.length) return [];
-  if (members.length === 1) return [...(members[0] ?? [])];
+  if (needed === members.length) return members.reduce<readonly Range[]>((a, b) => common(a, b), [[-Infinity, Infinity]]) as Range[];
   const starts = ends(members, 0);
   const stops = ends(members, 1);
   const found: Range[] = [];
@@ -104,4 +104,21 @@ function heldRanges(members: readonly (readonly Range[])[], needed: number): Ran
     }
   }
   return mergeRanges(found);
+}
+
+/** What two lists of merged ranges have in common. */
+function common(a: readonly Range[], b: readonly Range[]): Range[] {
+  const found: Range[] = [];
+  let i = 0;
+  let j = 0;
+  while (i < a.length && j < b.length) {
+    const [aFrom, aTo] = a[i] as Range;
+    const [bFrom, bTo] = b[j] as Range;
+    const from = Math.max(aFrom, bFrom);
+    const to = Math.min(aTo, bTo);
+    if (from <= to) found.push([from, to]);
+    if (aTo < bTo) i++;
+    else j++;
+  }
+  return found;
 }

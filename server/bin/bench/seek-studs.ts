@@ -15,8 +15,9 @@ function evenNumbers(seed: number): () => number {
 function wall(frames: number, studs: number, reachMm: number): SeekInput {
   const next = evenNumbers(7);
   const hangers = Array.from({ length: frames }, (_, f) => {
-    const x = 150 + next() * 7800;
-    return [-60, 60].map((side) => ({ id: `${f} ${side}`, frameId: `${f}`, xMm: x + side, slide: [-25, 25] as const, edgeMm: 7.2 }));
+    const x = 300 + next() * 7600;
+    // Every other frame is wide enough to reach from stud to stud.
+    return (f % 2 === 0 ? [-203.2, 203.2] : [-60, 60]).map((side) => ({ id: `${f} ${side}`, frameId: `${f}`, xMm: x + side, slide: [-25, 25] as const, edgeMm: 7.2 }));
   }).flat();
   return {
     hangers,
@@ -56,29 +57,31 @@ function scan(input: SeekInput): { frames: number; hangers: number; margin: numb
   return best;
 }
 
-function median(runs: number, work: () => unknown): number {
-  work();
+/** Middle and shortest of several runs, ms: on a busy machine the shortest tells more of the work itself. */
+function timed(runs: number, work: () => unknown): { middle: number; shortest: number } {
+  for (let i = 0; i < 5; i++) work();
   const times = Array.from({ length: runs }, () => {
     const from = performance.now();
     work();
     return performance.now() - from;
   });
-  return times.sort((a, b) => a - b)[Math.floor(runs / 2)] ?? NaN;
+  times.sort((a, b) => a - b);
+  return { middle: times[Math.floor(runs / 2)] ?? NaN, shortest: times[0] ?? NaN };
 }
 
 /** Times the seek on a large wall, beside trying every tenth of a millimetre. Goal: 300 frames on 20 studs in under 5 ms. */
 export async function run(): Promise<string[]> {
   const lines: string[] = [];
-  for (const [frames, reach] of [[30, 200], [300, 200], [300, 4000]] as const) {
+  for (const [frames, reach] of [[30, 200], [300, 200], [300, 2000]] as const) {
     const input = wall(frames, 20, reach);
-    const sought = median(31, () => seekStuds(input));
+    const sought = timed(51, () => seekStuds(input));
     const from = performance.now();
     const plain = scan(input);
     const scanned = performance.now() - from;
     const { score, ties } = seekStuds(input);
     const same = score?.framesHeld === plain.frames && score.hangersInStuds >= plain.hangers ? 'no worse' : 'WORSE';
     lines.push(
-      `${frames} frames, 20 studs, ±${reach} mm: ${sought.toFixed(2)} ms (scan by 0.1 mm ${scanned.toFixed(0)} ms, ${Math.round(scanned / sought)} times as long; ` +
+      `${frames} frames, 20 studs, ±${reach} mm: ${sought.middle.toFixed(2)} ms, at best ${sought.shortest.toFixed(2)} (scan by 0.1 mm ${scanned.toFixed(0)} ms, ${Math.round(scanned / sought.middle)} times as long; ` +
         `${same}: ${score?.framesHeld} frames and ${score?.hangersInStuds} hangers held, ${ties.length} tied)`,
     );
   }
@@ -88,6 +91,7 @@ export async function run(): Promise<string[]> {
   const obstructions = Array.from({ length: 20 }, (_, i) => ({
     outlineMm: [[400 * i, 250], [400 * i + 70, 250], [400 * i + 70, 365], [400 * i, 365]] as WallOutline, clearanceMm: 30,
   }));
-  lines.push(`allowed shifts, 300 hexagons and 20 outlets: ${median(31, () => allowedShifts(outlines, 8200, obstructions)).toFixed(2)} ms`);
+  const clear = timed(31, () => allowedShifts(outlines, 8200, obstructions));
+  lines.push(`allowed shifts, 300 hexagons and 20 outlets: ${clear.middle.toFixed(2)} ms, at best ${clear.shortest.toFixed(2)}`);
   return lines;
 }

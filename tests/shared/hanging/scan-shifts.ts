@@ -8,8 +8,8 @@ export interface Told {
   leastMarginMm: number;
 }
 
-/** Smaller than this the computer's rounding cannot be told from the wall, mm. */
-export const hairMm = 1e-6;
+/** What the computer's rounding may amount to, mm: far above its own error, below half of the millionths that sizes are told in. */
+export const hairMm = 4e-7;
 
 export function tellShift(input: SeekInput, shiftMm: number): Told {
   const metByFrame = new Map<string, { met: number; of: number }>();

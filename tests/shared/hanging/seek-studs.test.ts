@@ -6,14 +6,14 @@ import { betterOf, hairMm, scan, tellShift } from './scan-shifts.ts';
 const hanger = (id: string, xMm: number, slide: [number, number] = [0, 0], frameId = 'f') => ({ id, frameId, xMm, slide, edgeMm: 0 });
 const zone = (xMm: number, halfMm = 10) => ({ studId: `at ${xMm}`, xMm, halfMm });
 
-/** Layouts whose every size is a multiple of the step, or any number when it is 0. */
+/** Layouts whose every size is a multiple of the step, or any number of millionths of a millimetre when it is 0. */
 function layouts(stepMm: number): fc.Arbitrary<SeekInput> {
   const length = (min: number, max: number) =>
-    stepMm === 0 ? fc.double({ min, max, noNaN: true }) : fc.integer({ min: Math.ceil(min / stepMm), max: Math.floor(max / stepMm) }).map((n) => n * stepMm);
+    stepMm === 0 ? fc.double({ min, max, noNaN: true }).map((v) => Math.round(v * 1e6) / 1e6) : fc.integer({ min: Math.ceil(min / stepMm), max: Math.floor(max / stepMm) }).map((n) => n * stepMm);
   const one = fc.record({
     frame: fc.nat(5), xMm: length(0, 1500), down: length(0, 60), up: length(0, 60), edgeMm: length(0, 8),
   });
-  const regular = fc.tuple(length(0, 300), fc.constantFrom(38, 300, 406.4), fc.integer({ min: 1, max: 5 }), length(2, 19)).map(([first, apart, n, halfMm]) =>
+  const regular = fc.tuple(length(0, 300), fc.constantFrom(38, 300, 406.4, 12), fc.integer({ min: 1, max: 5 }), length(2, 19)).map(([first, apart, n, halfMm]) =>
     Array.from({ length: n }, (_, k) => ({ studId: `s${k}`, xMm: first + k * apart, halfMm })));
   const loose = fc.array(fc.record({ xMm: length(-100, 1700), halfMm: length(0, 25) }), { maxLength: 6 }).map((zs) => zs.map((z, k) => ({ studId: `s${k}`, ...z })));
   const range = fc.tuple(length(-90, 90), length(0, 60)).map(([from, long]): [number, number] => [from, from + long]);
