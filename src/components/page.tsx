@@ -9,7 +9,7 @@ export function Page({ narrow = false, children }: { narrow?: boolean; children:
 /** A headed part of a page, with what can be done to it at the right. */
 export function Section({ title, action, children }: { title: string; action?: ReactNode; children: ReactNode }) {
   return (
-    <section aria-label={title}>
+    <section aria-label={title} className="min-w-0">
       <div className="mb-3 flex flex-wrap items-center justify-between gap-3 border-b border-plaster-200 pb-2">
         <h2 className="text-lg font-bold text-ink-900">{title}</h2>
         {action}

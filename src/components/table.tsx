@@ -5,7 +5,7 @@ import { classNames } from './class-names.ts';
 export function Table({ caption, children, className }: { caption: string; children: ReactNode; className?: string }) {
   return (
     // Focusable, so that what is cut off can be reached by keyboard.
-    <div role="region" aria-label={caption} tabIndex={0} className={classNames('overflow-x-auto border border-plaster-200 bg-white', className)}>
+    <div role="region" aria-label={`${caption}: table`} tabIndex={0} className={classNames('overflow-x-auto border border-plaster-200 bg-white', className)}>
       <table className="w-full border-collapse text-left">
         <caption className="sr-only">{caption}</caption>
         {children}

@@ -17,19 +17,19 @@ interface Props {
 /** The ruled band that heads a working page, in the manner of a drawing's title block. Holds the page's h1. */
 export function TitleBlock({ title, above, cells = [], action }: Props) {
   return (
-    <div className="flex flex-wrap items-stretch border border-ink-700 bg-white">
-      <div className="flex min-w-0 grow basis-64 flex-col justify-center px-4 py-2">
+    <div className="flex flex-wrap items-stretch gap-px overflow-hidden border border-ink-700 bg-plaster-200">
+      <div className="flex min-w-0 grow basis-64 flex-col justify-center bg-white px-4 py-2">
         {above ? <div className="text-sm text-ink-700">{above}</div> : null}
         <h1 tabIndex={-1} data-page-heading className="text-xl font-bold break-words text-ink-900 outline-none">
           {title}
         </h1>
       </div>
       {cells.length > 0 ? (
-        <dl className="-mr-px -mb-px flex max-w-full grow-[2] flex-wrap max-md:basis-full md:contents">
+        <dl className="contents">
           {cells.map(({ label, value }) => (
             <div
               key={label}
-              className="flex grow basis-32 flex-col justify-center border-plaster-200 px-4 py-2 max-md:border-t max-md:border-r md:basis-auto md:border-l"
+              className="flex grow basis-32 flex-col justify-center bg-white px-4 py-2 md:basis-auto"
             >
               <dt className="text-xs text-ink-500">{label}</dt>
               <dd className="text-sm font-semibold break-words text-ink-900 tabular-nums">{value}</dd>
@@ -38,7 +38,7 @@ export function TitleBlock({ title, above, cells = [], action }: Props) {
         </dl>
       ) : null}
       {action ? (
-        <div className="flex items-center border-ink-700 px-4 py-2 max-md:basis-full max-md:border-t md:border-l [&>*]:max-md:w-full">{action}</div>
+        <div className="flex grow items-center bg-white px-4 py-2 max-md:basis-full md:grow-0 [&>*]:max-md:w-full">{action}</div>
       ) : null}
     </div>
   );

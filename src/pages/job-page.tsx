@@ -46,7 +46,6 @@ export function JobPage() {
     return <Page>{job.isError ? <ErrorState error={job.error} onRetry={() => void job.refetch()} /> : <Loading what="the job" />}</Page>;
   }
   const wallOf = (wallId: string) => walls.data?.find((wall) => wall.id === wallId);
-  const designs = new Map(patterns.data?.map((pattern) => [pattern.id, pattern.design]));
   const newest = layouts.data ? [...layouts.data].sort((a, b) => (a.updatedAt < b.updatedAt ? 1 : -1))[0] : undefined;
   const addWall = () => setDialog('wall');
   const startLayout = () => setDialog('layout');
@@ -98,7 +97,7 @@ export function JobPage() {
         {walls.data?.length ? (
           <WallSlips
             walls={walls.data}
-            draw={(wall) => <WallDrawing wall={wall} elevation={wall.photo?.elevation ?? null} siteMarks label={`Drawing of ${wall.name}`} className="size-full" />}
+            draw={(wall) => <WallDrawing wall={wall} elevation={wall.photo?.elevation ?? null} siteMarks small label={`Drawing of ${wall.name}`} className="size-full" />}
           />
         ) : null}
       </Section>
@@ -117,7 +116,7 @@ export function JobPage() {
             draw={(layout) => {
               const wall = wallOf(layout.wallId);
               return wall ? (
-                <WallDrawing wall={wall} elevation={wall.photo?.elevation ?? null} frames={layout.frames} designOf={(id) => designs.get(id)} label={`Drawing of ${layout.name}`} className="size-full" />
+                <WallDrawing wall={wall} elevation={wall.photo?.elevation ?? null} frames={layout.frames} patterns={patterns.data} small label={`Drawing of ${layout.name}`} className="size-full" />
               ) : null;
             }}
           />

@@ -60,15 +60,14 @@ function introduction(revisions: readonly PortalRevision[]): string {
 
 function OptionPicture({ revision }: { revision: PortalRevision }) {
   const { snapshot, elevationUrl } = revision;
-  const designs = new Map(snapshot.patterns.map((pattern) => [pattern.id, pattern.design]));
   return (
     <WallDrawing
       wall={snapshot.wall}
       elevation={snapshot.elevation && elevationUrl ? { ...snapshot.elevation, url: elevationUrl } : null}
       frames={snapshot.frames}
-      designOf={(id) => designs.get(id)}
+      patterns={snapshot.patterns}
       labels
-      label={`Option ${revision.letter} on ${snapshot.wall.name}: ${snapshot.frames.length} frames`}
+      label={`${revision.layoutName} on ${snapshot.wall.name}: ${snapshot.frames.length} frames`}
       className="max-h-[70dvh] w-full"
     />
   );

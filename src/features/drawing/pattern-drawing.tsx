@@ -1,9 +1,10 @@
 import { boxOf } from '../../../shared/geometry/polygon.ts';
+import { frameDrawing, shadowDrawing } from '../../../shared/layouts/drawing.ts';
 import { placedMembers } from '../../../shared/patterns/hangers.ts';
 import { outlineOf, ShapeError } from '../../../shared/patterns/outline.ts';
 import type { PatternDesign } from '../../../shared/patterns/pattern.ts';
-import { FrameDrawing } from './frame-drawing.tsx';
 import { viewBoxOf } from './svg-path.ts';
+import { SvgPen } from './svg-pen.tsx';
 
 const own = { xMm: 0, yMm: 0, turnRad: 0, flipped: false };
 
@@ -19,10 +20,11 @@ interface Props {
 export function PatternDrawing({ design, label, memberNumbers = false, className }: Props) {
   const box = outlineBox(design);
   if (!box) return null;
+  const { body, hangers } = frameDrawing(design);
   const margin = Math.max(box.right - box.left, box.top - box.bottom) * 0.08;
   return (
     <svg role="img" aria-label={label} viewBox={viewBoxOf(box, margin)} className={className}>
-      <FrameDrawing design={design} at={own} hangers />
+      <SvgPen drawing={[...shadowDrawing(design, outlineOf(design.shape)), ...body, ...hangers]} />
       {memberNumbers ? <MemberNumbers design={design} sizeMm={margin * 0.7} /> : null}
     </svg>
   );

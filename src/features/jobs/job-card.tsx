@@ -27,7 +27,9 @@ export function JobCard({ card }: { card: Job['card'] }) {
           ) : (
             <ul className="mt-1 text-sm text-ink-700">
               {card[key].map((words) => (
-                <li key={words}>{words}</li>
+                <li key={words} className="first-letter:uppercase">
+                  {words}
+                </li>
               ))}
             </ul>
           )}

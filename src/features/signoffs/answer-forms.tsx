@@ -25,10 +25,10 @@ export function AnswerForms({ token, revision, consent }: Props) {
   return (
     <div className="grid gap-3 sm:grid-cols-2">
       <Button weight="primary" className="min-h-12" onClick={() => setWay('sign')}>
-        Sign option {revision.letter}
+        Sign {revision.layoutName}
       </Button>
       <Button className="min-h-12" onClick={() => setWay('changes')}>
-        Ask for changes
+        Ask for changes<span className="sr-only"> to {revision.layoutName}</span>
       </Button>
     </div>
   );
@@ -44,7 +44,7 @@ function SignForm({ token, revision, consent, onBack }: Props & { onBack: () => 
   const { register, formState } = sheet.form;
   return (
     <form noValidate onSubmit={(event) => void sheet.submit(event)} className="border border-ink-700 bg-white px-4 py-4">
-      <h3 className="mb-3 text-lg font-bold">Sign option {revision.letter}</h3>
+      <h3 className="mb-3 text-lg font-bold">Sign {revision.layoutName}</h3>
       <div className="grid gap-4">
         <TextField label="Your full name" autoComplete="name" hint="Typed here, it stands as your signature." error={formState.errors.name?.message} {...register('name')} />
         <CheckField label={consent} error={formState.errors.agreed?.message} {...register('agreed')} />
@@ -67,7 +67,7 @@ function ChangesForm({ token, revision, onBack }: Omit<Props, 'consent'> & { onB
   const { register, formState } = sheet.form;
   return (
     <form noValidate onSubmit={(event) => void sheet.submit(event)} className="border border-ink-700 bg-white px-4 py-4">
-      <h3 className="mb-3 text-lg font-bold">Ask for changes to option {revision.letter}</h3>
+      <h3 className="mb-3 text-lg font-bold">Ask for changes to {revision.layoutName}</h3>
       <TextAreaField label="What should change?" rows={5} hint="Frames can be named by their numbers on the drawing." error={formState.errors.words?.message} {...register('words')} />
       {sheet.failure ? <ErrorState error={sheet.failure} /> : null}
       {sheet.unsaved ? <LeaveGuard unsaved /> : null}

@@ -23,10 +23,10 @@ export function PortalOption({ token, consent, revision, picture }: Props) {
     <article aria-labelledby={`option-${revision.id}`} className="flex flex-col gap-4">
       <header className="flex flex-wrap items-baseline justify-between gap-x-4 border-b border-ink-700 pb-1">
         <h2 id={`option-${revision.id}`} className="text-lg font-bold">
-          Option {revision.letter}: {revision.layoutName}
+          {revision.layoutName}
         </h2>
         <p className="text-sm text-ink-700">
-          {snapshot.wall.name}, sent {dayOf(revision.sentAt)}
+          {snapshot.wall.name}, revision {revision.letter}, sent {dayOf(revision.sentAt)}
         </p>
       </header>
       <figure className="border border-plaster-200 bg-plaster-100 p-2">{picture}</figure>
