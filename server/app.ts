@@ -137,7 +137,7 @@ function createRooms({ config, data, outbox, pool, clock, bcryptCost }: Parts) {
   const walls = wallsService({ walls: wallsRepository(data), jobs, files, pool, clock });
   const layouts = layoutsService({ layouts: layoutsRepository(data), jobs, walls, patterns, clock });
   const signoffs = signoffsService({ signoffs: signoffsRepository(data), layouts, jobs, walls, people, files, outbox, origin: config.appOrigin, clock });
-  const templates = templatesService({ layouts, jobs, people, pool, clock });
+  const templates = templatesService({ layouts, jobs, people, hardware, pool, clock });
   jobs.lookAt({
     wallsOf: (job) => walls.ofJob(job.shopId, job.id),
     layoutsOf: (job) => layouts.ofJob(job.shopId, job.id),

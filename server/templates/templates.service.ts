@@ -1,9 +1,16 @@
 import type { QueryOf } from '../../shared/api/endpoint.ts';
-import { placedHangers, placedOutline } from '../../shared/patterns/hangers.ts';
+import { assessBody } from '../../shared/findings/hung-body.ts';
+import { placeFrame } from '../../shared/findings/placed-frame.ts';
+import { usualLimits } from '../../shared/findings/scene.ts';
+import type { HardwareBook } from '../../shared/hardware/hardware-book.ts';
+import { leadHole } from '../../shared/hardware/lead-hole.ts';
+import { studSpecies, usualStudSpecies } from '../../shared/hardware/stud-species.ts';
+import type { PatternDesign } from '../../shared/patterns/pattern.ts';
 import type { TemplateInput } from '../../shared/templates/template-input.ts';
 import type { templatesApi } from '../../shared/templates/templates.api.ts';
 import { isConfirmed } from '../../shared/walls/wall.ts';
 import { ProblemError } from '../http/problems.ts';
+import type { HardwareService } from '../hardware/hardware.service.ts';
 import type { Who } from '../http/who.ts';
 import type { JobsService } from '../jobs/jobs.service.ts';
 import type { Content, LayoutsService } from '../layouts/layouts.service.ts';
@@ -14,17 +21,18 @@ interface Needs {
   layouts: LayoutsService;
   jobs: JobsService;
   people: PeopleService;
+  hardware: HardwareService;
   pool: WorkerPool;
   clock: () => Date;
 }
 
 /** The hanging template: gathers what the sheets need and has them drawn off the request thread. */
-export function templatesService({ layouts, jobs, people, pool, clock }: Needs) {
+export function templatesService({ layouts, jobs, people, hardware, pool, clock }: Needs) {
   return {
-    async pdf(who: Who, layoutId: string, { paper }: QueryOf<typeof templatesApi.pdf>, signal: AbortSignal): Promise<{ bytes: Uint8Array; fileName: string }> {
+    async pdf(who: Who, layoutId: string, { paper, correctionX, correctionY }: QueryOf<typeof templatesApi.pdf>, signal: AbortSignal): Promise<{ bytes: Uint8Array; fileName: string }> {
       const { content, told } = await layouts.whole(who, layoutId);
       if (content.frames.length === 0) throw new ProblemError('bad-input', 'There is no frame on the wall yet, so there is nothing to print.');
-      const [job, shop] = await Promise.all([jobs.jobFor(who, told.jobId), people.shopOf(who.shopId)]);
+      const [job, shop, book] = await Promise.all([jobs.jobFor(who, told.jobId), people.shopOf(who.shopId), hardware.bookOf(who.shopId)]);
       const revision = told.state === 'draft' ? undefined : told.revisions.at(-1);
       const input: TemplateInput = {
         title: { shop: shop.name, job: job.title, wall: content.wall.name, layout: told.name, letter: told.letter, state: told.state, sha256: revision?.sha256 ?? null },
@@ -33,12 +41,12 @@ export function templatesService({ layouts, jobs, people, pool, clock }: Needs) 
           heightMm: content.wall.heightMm,
           studs: content.wall.studs.map((s) => ({ xMm: s.xMm, widthMm: s.widthMm, confirmed: isConfirmed(s) })),
         },
-        frames: templateFrames(content),
+        frames: templateFrames(content, book),
         units: shop.units,
         paper,
         marginMm: 12.7,
         overlapMm: 12,
-        correction: { x: 1, y: 1 },
+        correction: { x: correctionX, y: correctionY },
         drawnAt: `${clock().toISOString().slice(0, 16).replace('T', ' ')} UTC`,
       };
       const bytes = await pool.run<TemplateInput, Uint8Array>('template', input, { signal });
@@ -49,18 +57,29 @@ export function templatesService({ layouts, jobs, people, pool, clock }: Needs) 
 export type TemplatesService = ReturnType<typeof templatesService>;
 
 /** Frames with outline and screws in wall coordinates; a screw is named by its frame's label and a small letter. */
-function templateFrames({ frames, patterns }: Content): TemplateInput['frames'] {
-  const designs = new Map(patterns.map((p) => [p.id, p.design]));
+function templateFrames({ frames, patterns, wall }: Content, book: HardwareBook): TemplateInput['frames'] {
+  const byId = new Map(patterns.map((p) => [p.id, p]));
   return frames.flatMap((frame) => {
-    const design = designs.get(frame.patternId);
-    if (!design) return [];
+    const pattern = byId.get(frame.patternId);
+    if (!pattern) return [];
+    const placed = placeFrame(frame, pattern);
+    const { hangers } = assessBody(frame.id, [placed], { wall, book, limits: usualLimits });
     return [{
       id: frame.id,
       label: frame.label,
-      outlineMm: placedOutline(frame, design),
-      hangers: placedHangers(frame, design).map((h, i) => ({
-        id: h.id, label: `${frame.label}${String.fromCharCode(97 + (i % 26))}`, x: h.x, y: h.y, drillMm: null, hardware: 'bracket and screw as chosen',
+      outlineMm: placed.outline,
+      hangers: hangers.map(({ hanger, x, y, meeting }, i) => ({
+        id: hanger.id, label: `${frame.label}${String.fromCharCode(97 + (i % 26))}`, x, y, ...fastener(hanger, meeting?.inStud === true || wall.construction === 'solid wood', book),
       })),
     }];
   });
+}
+
+/** What is drilled and driven for one hanger: its screw in wood, else its anchor, whose hole its packet states. */
+function fastener(hanger: PatternDesign['hangers'][number], inWood: boolean, book: HardwareBook): { drillMm: number | null; hardware: string } {
+  const bracket = book.brackets.find((b) => b.id === hanger.bracketId)?.name ?? 'bracket not chosen';
+  const screw = book.screws.find((s) => s.id === hanger.wallScrewId);
+  const anchor = book.anchors.find((a) => a.id === hanger.anchorId);
+  if (inWood) return { drillMm: screw ? leadHole(screw, studSpecies[usualStudSpecies]) : null, hardware: `${bracket}; ${screw?.name ?? 'screw not chosen'}` };
+  return { drillMm: null, hardware: `${bracket}; ${anchor ? `${anchor.name}, hole as its packet says` : 'anchor not chosen'}` };
 }
