@@ -147,10 +147,13 @@ describe('what wins', () => {
   });
 
   it('two hangers whose places only touch are both in', () => {
-    // 10.1 + 0.2 and 10.3 differ in the last bit of a computer's number.
+    // 0.3 + 10 and 420.3 − 410 differ in the last bit of a computer's number.
     const input: SeekInput = { hangers: [hanger('a', 0.1), hanger('b', 420.3)], zones: [zone(0, 10), zone(400, 10)], allowed: [[-100, 100]] };
     expect(seekStuds(input).score).toMatchObject({ hangersInStuds: 1 });
-    expect(seekStuds({ ...input, hangers: [hanger('a', 0.3), hanger('b', 420.3)] })).toMatchObject({ shiftMm: -10.3, score: { hangersInStuds: 2, leastMarginMm: 0 } });
+    const touching = { ...input, hangers: [hanger('a', 0.3), hanger('b', 420.3)] };
+    for (const needed of [2, 3]) {
+      expect(seekStuds({ ...touching, neededByFrame: { f: needed } })).toMatchObject({ shiftMm: -10.3, score: { hangersInStuds: 2, leastMarginMm: 0 } });
+    }
   });
 });
 
