@@ -69,12 +69,12 @@ function glints(opening: Polygon): Primitive[] {
   }));
 }
 
-/** The soft shadow a frame throws down and to the right: deeper frames throw a longer one. On the wall, mm. */
-export function shadowDrawing(design: Pick<PatternDesign, 'depthMm'>, outline: Polygon): Primitive[] {
-  return [0.16, 0.11, 0.06].map((share) => ({
-    kind: 'area', ink: 'shadow', holes: [], opacity: 0.07,
-    points: outline.map(({ x, y }) => ({ x: x + design.depthMm * share, y: y - design.depthMm * share })),
-  }));
+/** The soft shadow a ring throws down and to the right, outside it and within: deeper frames throw a longer one. On the wall, mm. */
+export function shadowDrawing(design: Pick<PatternDesign, 'depthMm'>, outline: Polygon, opening: Polygon): Primitive[] {
+  return [0.18, 0.12, 0.06].map((share) => {
+    const thrown = ({ x, y }: Point): Point => ({ x: x + design.depthMm * share, y: y - design.depthMm * share });
+    return { kind: 'area', ink: 'shadow', opacity: 0.1, points: outline.map(thrown), holes: opening.length > 0 ? [opening.map(thrown)] : [] };
+  });
 }
 
 /** A primitive brought from a frame's own plane to its place on the wall. */
@@ -137,8 +137,8 @@ export function layoutDrawing(input: {
     const design = designs.get(frame.patternId);
     if (!design) continue;
     const drawn = frameDrawing(design, frame.flipped);
-    const outline = placedAll(frameGeometry(design).outline, frame);
-    shadows.push(...shadowDrawing(design, outline));
+    const { outline, opening } = frameGeometry(design);
+    shadows.push(...shadowDrawing(design, placedAll(outline, frame), placedAll(opening, frame)));
     bodies.push(...drawn.body.map((p) => brought(p, frame)));
     if (hangers) over.push(...drawn.hangers.map((p) => brought(p, frame)));
     if (labels && frame.label) over.push({ kind: 'text', ink: 'words', at: { x: frame.xMm, y: frame.yMm }, words: frame.label, sizeMm: 60 });

@@ -1,4 +1,4 @@
-import { overlapDepth } from '../geometry/polygon-distance.ts';
+import { gapBetween, overlapDepth } from '../geometry/polygon-distance.ts';
 import { boxOf, placedAll, sidesOf, type Placement, type Point, type Polygon } from '../geometry/polygon.ts';
 import { edgeField, strongestSnap, type Neighbour } from './snap.ts';
 
@@ -9,6 +9,8 @@ export interface NextPlaceAsk {
   /** The frame to place it beside; the last one placed, or the one chosen. */
   besideId: string | null;
   wall: { widthMm: number; heightMm: number };
+  /** Outlines of what stands in the way: taken only where there is no other place. */
+  keepClear?: readonly Polygon[];
   revealMm: number;
 }
 
@@ -17,9 +19,10 @@ export interface NextPlaceAsk {
  * others and on the wall, as near to the middle of what hangs there as can be; the middle of the wall where that is
  * free or nothing else is.
  */
-export function nextPlace({ outline, neighbours, besideId, wall, revealMm }: NextPlaceAsk): Placement {
+export function nextPlace({ outline, neighbours, besideId, wall, keepClear = [], revealMm }: NextPlaceAsk): Placement {
   const middle: Placement = { xMm: wall.widthMm / 2, yMm: wall.heightMm / 2, turnRad: 0, flipped: false };
   const beside = neighbours.find((n) => n.frameId === besideId) ?? neighbours.at(-1);
+  const isFree = (placed: Polygon) => keepClear.every((o) => gapBetween(placed, o).mm > 0);
   if (!beside) return middle;
 
   const heart = meanOf(neighbours.flatMap((n) => n.outline));
@@ -37,23 +40,24 @@ export function nextPlace({ outline, neighbours, besideId, wall, revealMm }: Nex
       };
       const snap = strongestSnap(edgeField(neighbours), { outline, placement: at, revealMm, reachMm: radius, maxTurnRad });
       if (!snap || !isOnWall(placedAll(outline, snap.placement), wall)) continue;
-      found.push({ at: snap.placement, far: Math.hypot(snap.placement.xMm - heart.x, snap.placement.yMm - heart.y) });
+      const inTheWay = isFree(placedAll(outline, snap.placement)) ? 0 : wall.widthMm + wall.heightMm;
+      found.push({ at: snap.placement, far: inTheWay + Math.hypot(snap.placement.xMm - heart.x, snap.placement.yMm - heart.y) });
     }
-    if (found.length > 0) break;
+    if (found.some(({ far }) => far < wall.widthMm + wall.heightMm)) break;
   }
   found.sort((a, b) => a.far - b.far);
   const best = found[0];
-  if (best) return best.at;
+  if (best && best.far < wall.widthMm + wall.heightMm) return best.at;
   // No edge has room: the wall's middle, or the first clear place from it outwards.
   for (let ring = 0; ring <= 12; ring++) {
     for (let k = 0; k < Math.max(1, 6 * ring); k++) {
       const angle = (2 * Math.PI * k) / Math.max(1, 6 * ring);
       const at = { ...middle, xMm: middle.xMm + ring * radius * Math.cos(angle), yMm: middle.yMm + ring * radius * Math.sin(angle) };
       const placed = placedAll(outline, at);
-      if (isOnWall(placed, wall) && neighbours.every((n) => overlapDepth(placed, n.outline) <= 0)) return at;
+      if (isOnWall(placed, wall) && isFree(placed) && neighbours.every((n) => overlapDepth(placed, n.outline) <= 0)) return at;
     }
   }
-  return middle;
+  return best?.at ?? middle;
 }
 
 function isOnWall(outline: Polygon, wall: { widthMm: number; heightMm: number }): boolean {

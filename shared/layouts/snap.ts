@@ -107,7 +107,9 @@ export function strongestSnap(field: EdgeField, ask: SnapAsk): Snap | null {
 
   for (const theirs of near) {
     for (const own of edgesOf('', held)) {
-      const turn = turnToFace(own, theirs);
+      const toFace = turnToFace(own, theirs);
+      // Rounding is no turn: a frame that lies parallel keeps its turn to the last digit.
+      const turn = Math.abs(toFace) < PARALLEL / 10 ? 0 : toFace;
       if (Math.abs(turn) > Math.max(ask.maxTurnRad, PARALLEL)) continue;
       for (const { snap, jump } of snapsOnto(theirs, own.number, turn, ask, near)) {
         const ease = { 'second frame': 0.6, corner: 0.5, along: 0 }[snap.fit] * ask.reachMm;

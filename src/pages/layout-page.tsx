@@ -17,8 +17,17 @@ import { useFindings } from '../features/layouts/editor/ledger/use-findings.ts';
 import { savedTime, saveWords } from '../features/layouts/editor/saver/save-state.ts';
 import { useSaver } from '../features/layouts/editor/saver/use-saver.ts';
 import { readyDesigns } from '../features/layouts/editor/state/designs.ts';
-import { createEditorStore, EditorContext, useEditor, useEditorStore } from '../features/layouts/editor/state/editor-store.ts';
-import { hardwareOfLayoutQuery, layoutQuery, wallOfLayoutQuery } from '../features/layouts/layouts.queries.ts';
+import {
+  createEditorStore,
+  EditorContext,
+  useEditor,
+  useEditorStore,
+} from '../features/layouts/editor/state/editor-store.ts';
+import {
+  hardwareOfLayoutQuery,
+  layoutQuery,
+  wallOfLayoutQuery,
+} from '../features/layouts/layouts.queries.ts';
 import { patternsQuery } from '../features/patterns/patterns.queries.ts';
 import { SendDialog } from '../features/signoffs/send-dialog.tsx';
 import { TemplateDialog } from '../features/templates/template-dialog.tsx';
@@ -38,10 +47,20 @@ export function LayoutPage() {
   usePageTitle(layout.data && job.data ? `${layout.data.name}, ${job.data.title}` : undefined);
 
   if (layout.data && job.data && patterns.data && wall.data) {
-    return <Bench key={layoutId} layout={layout.data} job={job.data} patterns={patterns.data} wall={wall.data} />;
+    return (
+      <Bench key={layoutId} layout={layout.data} job={job.data} patterns={patterns.data} wall={wall.data} />
+    );
   }
   const failed = [layout, job, patterns, wall].find((query) => query.isError);
-  return <Page>{failed ? <ErrorState error={failed.error} onRetry={() => void failed.refetch()} /> : <Loading what="the layout" />}</Page>;
+  return (
+    <Page>
+      {failed ? (
+        <ErrorState error={failed.error} onRetry={() => void failed.refetch()} />
+      ) : (
+        <Loading what="the layout" />
+      )}
+    </Page>
+  );
 }
 
 interface Loaded {
@@ -82,39 +101,64 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
   const readyVersion = async (): Promise<number> => {
     await flush();
     const now = store.getState();
-    if (now.save.kind !== 'saved' || now.conflicts.length > 0) throw new Error('The layout is not saved yet.');
+    if (now.save.kind !== 'saved' || now.conflicts.length > 0)
+      throw new Error('The layout is not saved yet.');
     return now.stored.version;
   };
 
   return (
     <>
       <div className="flex w-full grow flex-col gap-3 px-4 py-3 lg:h-0 lg:min-h-[44rem]">
-        <TitleBlock
-          title={name}
-          above={
-            <Link to={paths.job(job.id)} className="text-chalk-600 underline">
-              Back to {job.title}
-            </Link>
-          }
-          cells={[
-            { label: 'Wall', value: wall.name },
-            { label: 'Revision', value: `${layout.letter}, ${layout.changedSinceSigned && layout.state === 'draft' ? 'changed since signed' : layout.state}` },
-            { label: 'Scale on screen', value: scaleWords(scale) },
-            { label: 'Units', value: units === 'in' ? 'inches' : 'mm' },
-            { label: 'Saved', value: <span role="status">{saveWords(save, stored.savedAt, stored.savedBy, (instant) => savedTime(instant, momentOf))}</span> },
-          ]}
-          action={
-            <div className="flex flex-wrap gap-2">
-              <Button onClick={() => setDialog('template')}>Template</Button>
-              {mayChange ? (
-                <Button weight="primary" disabled={frameCount === 0 || asking} onClick={() => setDialog('send')}>
-                  Send to client
-                </Button>
-              ) : null}
-            </div>
-          }
+        <div className="shrink-0">
+          <TitleBlock
+            title={name}
+            above={
+              <Link to={paths.job(job.id)} className="text-chalk-600 underline">
+                Back to {job.title}
+              </Link>
+            }
+            cells={[
+              { label: 'Wall', value: wall.name },
+              {
+                label: 'Revision',
+                value: `${layout.letter}, ${layout.changedSinceSigned && layout.state === 'draft' ? 'changed since signed' : layout.state}`,
+              },
+              { label: 'Scale on screen', value: scaleWords(scale) },
+              { label: 'Units', value: units === 'in' ? 'inches' : 'mm' },
+              {
+                label: 'Draft',
+                value: (
+                  <span role="status">
+                    {saveWords(save, stored.savedAt, stored.savedBy, (instant) =>
+                      savedTime(instant, momentOf),
+                    )}
+                  </span>
+                ),
+              },
+            ]}
+            action={
+              <div className="flex flex-wrap gap-2">
+                <Button onClick={() => setDialog('template')}>Template</Button>
+                {mayChange ? (
+                  <Button
+                    weight="primary"
+                    disabled={frameCount === 0 || asking}
+                    onClick={() => setDialog('send')}
+                  >
+                    Send to client
+                  </Button>
+                ) : null}
+              </div>
+            }
+          />
+        </div>
+        <LayoutEditor
+          wall={wall}
+          designs={designs}
+          findings={findings}
+          readOnly={readOnly}
+          narrow={narrow && mayChange}
         />
-        <LayoutEditor wall={wall} designs={designs} findings={findings} readOnly={readOnly} narrow={narrow && mayChange} />
       </div>
       {dialog === 'send' ? (
         <SendDialog
@@ -126,7 +170,9 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
           onClose={() => setDialog(null)}
         />
       ) : null}
-      {dialog === 'template' ? <TemplateDialog layout={layout} ready={readyVersion} onClose={() => setDialog(null)} /> : null}
+      {dialog === 'template' ? (
+        <TemplateDialog layout={layout} ready={readyVersion} onClose={() => setDialog(null)} />
+      ) : null}
       <LeaveGuard unsaved={mayChange && (save.kind === 'offline' || save.kind === 'refused' || asking)} />
     </>
   );
@@ -135,7 +181,9 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
 /** How many times smaller than life the wall is drawn, at the 96 px that CSS calls an inch. */
 function scaleWords(pxPerMm: number): string {
   const times = 96 / 25.4 / pxPerMm;
-  return times >= 1 ? `1 : ${times < 10 ? times.toFixed(1) : Math.round(times)}` : `${(1 / times).toFixed(1)} : 1`;
+  return times >= 1
+    ? `1 : ${times < 10 ? times.toFixed(1) : Math.round(times)}`
+    : `${(1 / times).toFixed(1)} : 1`;
 }
 
 const narrowQuery = '(max-width: 767px)';

@@ -38,6 +38,17 @@ describe('a frame placed without a hand', () => {
     });
   });
 
+  it('keeps off what stands in the way as long as there is room elsewhere', () => {
+    const outline = outlineOf(hexagon);
+    const door = [{ x: 0, y: 0 }, { x: 3000, y: 0 }, { x: 3000, y: 1000 }, { x: 0, y: 1000 }];
+    const placed: { frameId: string; outline: Polygon }[] = [];
+    for (let i = 0; i < 6; i++) {
+      const at = nextPlace({ outline, neighbours: placed, besideId: null, wall, keepClear: [door], revealMm: 4 });
+      placed.push({ frameId: `f${i}`, outline: placedAll(outline, at) });
+    }
+    for (const p of placed) expect(boxOf(p.outline).bottom).toBeGreaterThan(1000);
+  });
+
   it('still finds a clear place elsewhere when the last one stands in a corner it cannot leave', () => {
     const narrow = { widthMm: 420, heightMm: 2400 };
     const outlines = placeOneAfterAnother([hexagon, hexagon, hexagon], narrow);

@@ -1,4 +1,5 @@
 import type { Wall } from '../../../../shared/walls/wall.ts';
+import { classNames } from '../../../components/class-names.ts';
 import { Notice } from '../../../components/notice.tsx';
 import { ConflictNotice } from './ledger/conflict-notice.tsx';
 import { FindingsLedger, type ShownFinding } from './ledger/findings-ledger.tsx';
@@ -34,7 +35,7 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
           </Notice>
         ) : null}
         <ConflictNotice />
-        <div className="flex h-[68dvh] min-h-80 flex-col border border-ink-700 lg:h-auto lg:min-h-[26rem] lg:grow">
+        <div className={classNames('flex min-h-80 flex-col border border-ink-700 lg:h-auto lg:min-h-[26rem] lg:grow', narrow ? 'h-[52dvh]' : 'h-[72dvh]')}>
           <StageToolbar wall={wall} readOnly={readOnly} />
           <LayoutStage wall={wall} designs={designs} readOnly={readOnly} />
           <StatusLine readOnly={readOnly} />

@@ -36,8 +36,9 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
   };
   const onWall = (point: Point) => toWall(store.getState().view, point);
   const letGo = () => {
+    // What is in the hand may have come from the tray: then it is not ours to let go.
+    if (doing && store.getState().hand) store.setState({ hand: null });
     doing = null;
-    if (store.getState().hand) store.setState({ hand: null });
   };
 
   function down(event: PointerEvent): void {

@@ -1,50 +1,97 @@
+import type { Figure } from '../../../../../shared/units/figure.ts';
+import { FigureText } from '../../../../components/figure-text.tsx';
 import { WeightMark } from '../../../../components/weight-mark.tsx';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
 
 /** A finding as the ledger shows it. */
 export interface ShownFinding {
   id: string;
+  rule: string;
   weight: 'stop' | 'caution' | 'note';
   title: string;
   words: string;
   frameIds: readonly string[];
+  figures: readonly Figure[];
+  source: string;
 }
 
 const weights = ['stop', 'caution', 'note'] as const;
 
-/** What the checks found, heaviest first; pressing one chooses the frames it speaks of. Null while the checks cannot run. */
+interface Group {
+  weight: ShownFinding['weight'];
+  title: string;
+  source: string;
+  list: ShownFinding[];
+}
+
+/** Findings of one rule and weight together, heaviest first. */
+export function groupedFindings(findings: readonly ShownFinding[]): Group[] {
+  const groups = new Map<string, Group>();
+  for (const finding of findings) {
+    const key = `${finding.weight} ${finding.rule}`;
+    const group = groups.get(key);
+    if (group) group.list.push(finding);
+    else groups.set(key, { weight: finding.weight, title: finding.title, source: finding.source, list: [finding] });
+  }
+  return [...groups.values()].sort((a, b) => weights.indexOf(a.weight) - weights.indexOf(b.weight));
+}
+
+/** What the checks found; each can be opened to its words and figures, and chooses its frames. Null while the checks cannot run. */
 export function FindingsLedger({ findings }: { findings: readonly ShownFinding[] | null }) {
-  const store = useEditorStore();
-  const frames = useEditor((e) => e.bench.frames);
-  const counted = weights.map((weight) => ({ weight, list: (findings ?? []).filter((f) => f.weight === weight) })).filter(({ list }) => list.length > 0);
-  const labels = (ids: readonly string[]) => ids.map((id) => frames.find((f) => f.id === id)?.label ?? '?').join(', ');
+  const frameCount = useEditor((e) => e.bench.frames.length);
+  const groups = groupedFindings(findings ?? []);
+  const counts = weights.flatMap((weight) => {
+    const n = (findings ?? []).filter((f) => f.weight === weight).length;
+    return n > 0 ? [`${n} ${weight}`] : [];
+  });
+  const none = findings === null ? 'The checks cannot run just now.' : frameCount === 0 ? 'Nothing to check yet.' : 'Nothing found.';
   return (
     <section aria-label="Findings">
-      <h2 className="border-b border-plaster-200 pb-1 text-base font-bold text-ink-900">Findings</h2>
-      <p role="status" className="sr-only">
-        {findings ? counted.map(({ weight, list }) => `${list.length} ${weight}`).join(', ') || 'No findings' : ''}
-      </p>
-      {counted.length === 0 ? <p className="mt-2 text-sm text-ink-700">{findings === null ? 'The checks cannot run just now.' : frames.length === 0 ? 'Nothing to check yet.' : 'Nothing found.'}</p> : null}
-      {counted.map(({ weight, list }) => (
-        <ul key={weight} className="mt-2 grid gap-1">
-          {list.map((finding) => (
-            <li key={finding.id}>
-              <button
-                type="button"
-                onClick={() => store.dispatch({ kind: 'select', ids: finding.frameIds })}
-                className="block w-full rounded-sm border border-plaster-200 bg-white px-2 py-1.5 text-left hover:border-chalk-600"
-              >
-                <span className="flex items-baseline gap-2">
-                  <WeightMark weight={weight} />
-                  <span className="text-sm font-semibold text-ink-900">{finding.title}</span>
-                  {finding.frameIds.length > 0 ? <span className="ml-auto text-xs text-ink-700">{labels(finding.frameIds)}</span> : null}
-                </span>
-                <span className="block text-sm text-ink-700">{finding.words}</span>
-              </button>
-            </li>
-          ))}
-        </ul>
-      ))}
+      <div className="flex items-baseline justify-between border-b border-plaster-200 pb-1">
+        <h2 className="text-base font-bold text-ink-900">Findings</h2>
+        <p role="status" className="text-sm text-ink-700 tabular-nums">
+          {counts.join(', ') || none}
+        </p>
+      </div>
+      <div className="mt-2 grid gap-1">
+        {groups.map((group) => (
+          <RuleGroup key={`${group.weight} ${group.title}`} group={group} />
+        ))}
+      </div>
     </section>
+  );
+}
+
+function RuleGroup({ group: { weight, title, source, list } }: { group: Group }) {
+  const store = useEditorStore();
+  const frames = useEditor((e) => e.bench.frames);
+  const frameIds = [...new Set(list.flatMap((f) => f.frameIds))];
+  return (
+    // Stops stand open: nobody should have to look for what must not be hung.
+    <details open={weight === 'stop'} className="rounded-sm border border-plaster-200 bg-white">
+      <summary className="flex cursor-pointer items-start gap-2 px-2 py-1.5 hover:text-chalk-700">
+        <WeightMark weight={weight} />
+        <span className="grow text-sm font-semibold">{title}</span>
+        {list.length > 1 ? <span className="shrink-0 text-sm whitespace-nowrap text-ink-700 tabular-nums">× {list.length}</span> : null}
+      </summary>
+      <ul className="grid gap-2 border-t border-plaster-200 px-2 py-2 text-sm text-ink-900">
+        {list.map((finding) => (
+          <li key={finding.id}>
+            <p>{finding.words}</p>
+            {finding.figures.map((figure) => (
+              <FigureText key={figure.label} figure={figure} />
+            ))}
+          </li>
+        ))}
+      </ul>
+      <p className="flex flex-wrap items-baseline justify-between gap-2 border-t border-plaster-200 px-2 py-1.5 text-xs text-ink-700">
+        <span>Source: {source}</span>
+        {frameIds.length > 0 ? (
+          <button type="button" onClick={() => store.dispatch({ kind: 'select', ids: frameIds })} className="min-h-6 font-semibold text-chalk-700 underline underline-offset-4">
+            Show {frameIds.length === 1 ? `frame ${frames.find((f) => f.id === frameIds[0])?.label ?? ''}` : `${frameIds.length} frames`}
+          </button>
+        ) : null}
+      </p>
+    </details>
   );
 }

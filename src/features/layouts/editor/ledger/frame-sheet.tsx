@@ -89,6 +89,7 @@ function OneFrame({ frame }: { frame: Frame }) {
       <SetMassField
         className="col-span-2"
         label="Is to carry"
+        hint="Empty takes what its pattern says, or the usual load for its size."
         optional
         value={frame.contentsKg}
         onSet={(contentsKg) => set({ contentsKg }, 'loaded otherwise')}

@@ -65,11 +65,14 @@ function strokeOf(primitive: Primitive): Stroke {
     }
     case 'dot': {
       const { colour } = inkLook(primitive.ink);
-      const path = new Path2D();
-      path.arc(primitive.at.x, primitive.at.y, primitive.radiusMm, 0, 2 * Math.PI);
-      return (context) => {
+      const { at, radiusMm, ink } = primitive;
+      // Hangers stay in sight when the whole wall is.
+      const leastPx = ink === 'hanger rim' ? 4 : 2.6;
+      return (context, pxPerMm) => {
         context.fillStyle = colour;
-        context.fill(path);
+        context.beginPath();
+        context.arc(at.x, at.y, Math.max(radiusMm, leastPx / pxPerMm), 0, 2 * Math.PI);
+        context.fill();
       };
     }
     case 'text':

@@ -1,12 +1,12 @@
 import type Konva from 'konva';
 import { useCallback, useMemo } from 'react';
 import { Layer, Shape } from 'react-konva';
-import { placedAll, type Placement, type Polygon } from '../../../../../shared/geometry/polygon.ts';
+import { placedAll, type Placement } from '../../../../../shared/geometry/polygon.ts';
 import { shadowDrawing, wallDrawing } from '../../../../../shared/layouts/drawing.ts';
 import type { Frame } from '../../../../../shared/layouts/layout.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
 import { colours } from '../../../../../tailwind.config.ts';
-import { type Designs, type ReadyPattern, wallOutline } from '../state/designs.ts';
+import type { Designs, ReadyPattern } from '../state/designs.ts';
 import { useEditor } from '../state/editor-store.ts';
 import { draw, drawPicture, write } from './canvas-pen.ts';
 import { layerPlace } from './view.ts';
@@ -54,7 +54,7 @@ export function SiteLayer({ wall }: { wall: Wall }) {
   return <WallLayer paint={paint} />;
 }
 
-const shadows = new WeakMap<Polygon, ReturnType<typeof shadowDrawing>>();
+const shadows = new WeakMap<Placement, ReturnType<typeof shadowDrawing>>();
 const labelPx = 14;
 
 function paintFrame(context: CanvasRenderingContext2D, pattern: ReadyPattern, at: Placement, pxPerMm: number, hangers: boolean): void {
@@ -67,9 +67,9 @@ function paintFrame(context: CanvasRenderingContext2D, pattern: ReadyPattern, at
   context.restore();
 }
 
-function paintShadow(context: CanvasRenderingContext2D, pattern: ReadyPattern, outline: Polygon, pxPerMm: number): void {
-  let shadow = shadows.get(outline);
-  if (!shadow) shadows.set(outline, (shadow = shadowDrawing(pattern.design, outline)));
+function paintShadow(context: CanvasRenderingContext2D, pattern: ReadyPattern, at: Placement, pxPerMm: number): void {
+  let shadow = shadows.get(at);
+  if (!shadow) shadows.set(at, (shadow = shadowDrawing(pattern.design, placedAll(pattern.outline, at), placedAll(pattern.opening, at))));
   draw(context, shadow, pxPerMm);
 }
 
@@ -84,7 +84,7 @@ export function FramesLayer({ designs }: { designs: Designs }) {
     (context: CanvasRenderingContext2D, pxPerMm: number) => {
       const held = heldKey ? new Set(heldKey.split(' ')) : none;
       const still = frames.filter((f) => !held.has(f.id) && designs.has(f.patternId));
-      for (const frame of still) paintShadow(context, designs.get(frame.patternId)!, wallOutline(frame, designs)!, pxPerMm);
+      for (const frame of still) paintShadow(context, designs.get(frame.patternId)!, frame, pxPerMm);
       for (const frame of still) paintFrame(context, designs.get(frame.patternId)!, frame, pxPerMm, hangers);
       for (const frame of still) paintLabel(context, frame, pxPerMm);
     },
@@ -109,7 +109,7 @@ export function HandLayer({ designs }: { designs: Designs }) {
       if (hand.fromTray?.at) held.push([designs.get(hand.fromTray.patternId), hand.fromTray.at]);
       for (const [pattern, at] of held) {
         if (!pattern) continue;
-        paintShadow(context, pattern, placedAll(pattern.outline, at), pxPerMm);
+        paintShadow(context, pattern, at, pxPerMm);
         paintFrame(context, pattern, at, pxPerMm, hangers);
       }
     },

@@ -1,7 +1,8 @@
 import { placedAll, type Polygon } from '../../../../../shared/geometry/polygon.ts';
 import { frameDrawing, type Primitive } from '../../../../../shared/layouts/drawing.ts';
 import type { Frame } from '../../../../../shared/layouts/layout.ts';
-import { outlineOf, ShapeError } from '../../../../../shared/patterns/outline.ts';
+import { frameGeometry } from '../../../../../shared/patterns/frame.ts';
+import { ShapeError } from '../../../../../shared/patterns/outline.ts';
 import type { Pattern, PatternDesign } from '../../../../../shared/patterns/pattern.ts';
 
 /** A pattern made ready for the wall: what every gesture and every stroke needs, worked out once. */
@@ -12,6 +13,8 @@ export interface ReadyPattern {
   design: PatternDesign;
   /** About its centroid, counter-clockwise, mm. */
   outline: Polygon;
+  /** The outline less the members; empty where they leave none. */
+  opening: Polygon;
   /** Farthest corner from the centroid, mm. */
   radiusMm: number;
   drawing: (flipped: boolean) => { body: Primitive[]; hangers: Primitive[] };
@@ -24,8 +27,8 @@ export function readyDesigns(patterns: readonly Pattern[]): Designs {
   const ready = new Map<string, ReadyPattern>();
   for (const { id, name, archived, design } of patterns) {
     try {
-      const outline = outlineOf(design.shape);
-      ready.set(id, { id, name, archived, design, outline, radiusMm: Math.max(...outline.map((p) => Math.hypot(p.x, p.y))), drawing: onceEach((flipped) => frameDrawing(design, flipped)) });
+      const { outline, opening } = frameGeometry(design);
+      ready.set(id, { id, name, archived, design, outline, opening, radiusMm: Math.max(...outline.map((p) => Math.hypot(p.x, p.y))), drawing: onceEach((flipped) => frameDrawing(design, flipped)) });
     } catch (error) {
       if (!(error instanceof ShapeError)) throw error;
     }

@@ -21,7 +21,7 @@ export function placeNext(store: EditorStore, designs: Designs, pattern: ReadyPa
       const outline = wallOutline(frame, designs);
       return outline ? [{ frameId: frame.id, outline }] : [];
     });
-  const at = nextPlace({ outline: pattern.outline, neighbours, besideId: selected.at(-1) ?? null, wall, revealMm: bench.sheet.revealMm });
+  const at = nextPlace({ outline: pattern.outline, neighbours, besideId: selected.at(-1) ?? null, wall, keepClear: wall.obstructions.map((o) => o.outlineMm.map(([x, y]) => ({ x, y }))), revealMm: bench.sheet.revealMm });
   const frameId = newId();
   store.act(`${pattern.name} placed`, place(bench.frames, frameId, pattern.id, at), { select: [frameId] });
 }
@@ -47,7 +47,7 @@ export function Tray({ designs, wall }: { designs: Designs; wall: Wall }) {
                 onPointerDown={(event) => carryFromTray(event.nativeEvent, pattern.id, { store, designs, newId })}
                 // A press by mouse or finger is a drag; a click without one comes from keys or from a screen reader, or is a plain press: both place.
                 onClick={() => placeNext(store, designs, pattern, wall)}
-                className="flex w-36 cursor-grab touch-pan-x items-center gap-2 rounded-sm border border-plaster-200 bg-plaster-50 p-2 text-left hover:border-chalk-600"
+                className="flex w-44 cursor-grab touch-pan-x items-center gap-2 rounded-sm border border-plaster-200 bg-plaster-50 p-2 text-left hover:border-chalk-600"
               >
                 <PatternPicture pattern={pattern} className="size-12 shrink-0" />
                 <span className="min-w-0 text-sm">
