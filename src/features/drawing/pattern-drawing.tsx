@@ -1,7 +1,8 @@
 import { boxOf } from '../../../shared/geometry/polygon.ts';
 import { frameDrawing, shadowDrawing } from '../../../shared/layouts/drawing.ts';
 import { placedMembers } from '../../../shared/patterns/hangers.ts';
-import { outlineOf, ShapeError } from '../../../shared/patterns/outline.ts';
+import { frameGeometry } from '../../../shared/patterns/frame.ts';
+import { ShapeError } from '../../../shared/patterns/outline.ts';
 import type { PatternDesign } from '../../../shared/patterns/pattern.ts';
 import { viewBoxOf } from './svg-path.ts';
 import { SvgPen } from './svg-pen.tsx';
@@ -18,13 +19,15 @@ interface Props {
 
 /** One frame design, as large as its place allows; nothing where the shape cannot be made. */
 export function PatternDrawing({ design, label, memberNumbers = false, className }: Props) {
-  const box = outlineBox(design);
-  if (!box) return null;
+  const geometry = geometryOrNull(design);
+  if (!geometry) return null;
+  const { outline, opening } = geometry;
+  const box = boxOf(outline);
   const { body, hangers } = frameDrawing(design);
   const margin = Math.max(box.right - box.left, box.top - box.bottom) * 0.08;
   return (
     <svg role="img" aria-label={label} viewBox={viewBoxOf(box, margin)} className={className}>
-      <SvgPen drawing={[...shadowDrawing(design, outlineOf(design.shape)), ...body, ...hangers]} />
+      <SvgPen drawing={[...shadowDrawing(design, outline, opening), ...body, ...hangers]} />
       {memberNumbers ? <MemberNumbers design={design} sizeMm={margin * 0.7} /> : null}
     </svg>
   );
@@ -49,9 +52,9 @@ function MemberNumbers({ design, sizeMm }: { design: PatternDesign; sizeMm: numb
   );
 }
 
-function outlineBox(design: PatternDesign) {
+function geometryOrNull(design: PatternDesign) {
   try {
-    return boxOf(outlineOf(design.shape));
+    return frameGeometry(design);
   } catch (error) {
     if (error instanceof ShapeError) return null;
     throw error;
