@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import { mkdirSync } from 'node:fs';
+import { mkdirSync, readdirSync, rmSync } from 'node:fs';
 import { copyFile, mkdir, open, rename, rm, stat } from 'node:fs/promises';
 import path from 'node:path';
 import type { Response } from 'express';
@@ -17,6 +17,8 @@ const shopForm = /^[0-9a-f-]{36}$/;
 export function createFileStore(dataDir: string) {
   const root = path.join(dataDir, 'files');
   mkdirSync(root, { recursive: true, mode: 0o700 });
+  // What a crash or a cut-off task left half written was never in force.
+  for (const name of readdirSync(root, { recursive: true }) as string[]) if (name.endsWith('.part')) rmSync(path.join(root, name), { force: true });
 
   const pathOf = (key: string): string => {
     if (!keyForm.test(key)) throw new RangeError(`"${key}" is not a key of the file store.`);

@@ -8,7 +8,7 @@ import { ProblemError } from '../http/problems.ts';
 export interface WorkerPool {
   /**
    * Runs a task in a thread of its own. Input and result are copied between threads, so both must be plain data.
-   * When `signal` fires the task is dropped or its thread ended, and the promise rejects with an AbortError.
+   * When `signal` fires the task is dropped or its thread ended, and the promise rejects with ProblemError `gone`.
    * Throws ProblemError `unavailable` where too much work is waiting already; what the task throws passes through.
    */
   run<Input, Result>(task: string, input: Input, options?: { signal?: AbortSignal }): Promise<Result>;
@@ -34,7 +34,13 @@ export function createPool({ maxThreads = 2, maxQueue = 32 } = {}): WorkerPool {
     async run(task, input, { signal } = {}) {
       if (!/^[a-z][a-z-]*$/.test(task)) throw new RangeError(`"${task}" is not a task's name.`);
       if (pool.queueSize >= maxQueue) throw new ProblemError('unavailable', 'Much work is waiting just now. Please try again in a minute.');
-      return pool.run(input, { filename: path.join(tasks, `${task}.ts`), ...(signal ? { signal } : {}) });
+      try {
+        return await pool.run(input, { filename: path.join(tasks, `${task}.ts`), ...(signal ? { signal } : {}) });
+      } catch (error) {
+        // Whoever called it off has gone: nothing failed, and nobody waits for an answer.
+        if (signal?.aborted) throw new ProblemError('gone', 'This work was called off.');
+        throw error;
+      }
     },
     close: () => pool.destroy(),
   };

@@ -62,6 +62,12 @@ export const usualClearanceMm: Record<Obstruction['kind'], number> = {
   opening: 25, switch: 50, outlet: 50, thermostat: 100, vent: 100, radiator: 150, trim: 10, furniture: 25, pipe: 50, cable: 50,
 };
 
+/** The clearance to start from, mm, as a shop would say it: to the millimetre, or to the half inch. */
+export function startingClearanceMm(kind: Obstruction['kind'], units: 'in' | 'mm'): number {
+  const mm = usualClearanceMm[kind];
+  return units === 'mm' ? mm : Math.max(1, Math.round(mm / 12.7)) * 12.7;
+}
+
 /** New studs nearer than this to one that was found are taken to be that one, mm. */
 const sameStudMm = 100;
 

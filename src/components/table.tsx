@@ -4,8 +4,8 @@ import { classNames } from './class-names.ts';
 /** A real table, ruled; it scrolls sideways by itself where the page is narrower. `caption` names it for those who hear it. */
 export function Table({ caption, children, className }: { caption: string; children: ReactNode; className?: string }) {
   return (
-    // Focusable, so that what is cut off can be reached by keyboard.
-    <div role="region" aria-label={`${caption}: table`} tabIndex={0} className={classNames('overflow-x-auto border border-plaster-200 bg-white', className)}>
+    // Focusable, so that what is cut off can be reached by keyboard; positioned, so that words hidden from sight scroll along.
+    <div role="region" aria-label={`${caption}: table`} tabIndex={0} className={classNames('relative overflow-x-auto border border-plaster-200 bg-white', className)}>
       <table className="w-full border-collapse text-left">
         <caption className="sr-only">{caption}</caption>
         {children}

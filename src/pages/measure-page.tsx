@@ -12,6 +12,7 @@ import { Page, Section } from '../components/page.tsx';
 import { TitleBlock } from '../components/title-block.tsx';
 import { WallDrawing } from '../features/drawing/wall-drawing.tsx';
 import { jobQuery } from '../features/jobs/jobs.queries.ts';
+import type { MarkDraft } from '../features/walls/marks-draft.ts';
 import { ObstructionFields } from '../features/walls/obstruction-fields.tsx';
 import { PhotoUpload } from '../features/walls/photo-upload.tsx';
 import { ShapeFields } from '../features/walls/shape-fields.tsx';
@@ -21,7 +22,7 @@ import { StudFields } from '../features/walls/stud-fields.tsx';
 import { useWallDraft } from '../features/walls/use-wall-draft.ts';
 import { drawable } from '../features/walls/wall-draft.ts';
 import { WallFacts } from '../features/walls/wall-facts.tsx';
-import { WallGrid } from '../features/walls/wall-grid.tsx';
+import { WallGrid, WallLegend } from '../features/walls/wall-grid.tsx';
 import { constructionWords } from '../features/walls/wall-words.ts';
 import { useRemovePhoto, wallQuery } from '../features/walls/walls.queries.ts';
 import { keys } from '../lib/keys.ts';
@@ -49,6 +50,8 @@ function Measure({ wall }: { wall: Wall }) {
   const mayChange = useMay('change jobs');
   const sheet = useWallDraft(wall);
   const [view, setView] = useState<View>(() => firstView(wall, mayChange));
+  const [moved, setMoved] = useState<{ photoId: string; marks: MarkDraft[] } | null>(null);
+  const movedHere = moved && moved.photoId === wall.photo?.id ? moved.marks : null;
   const shown = drawable(sheet.draft, wall);
   const open = shown.studs.filter((s) => !isConfirmed(s)).length;
   const takeTheirs = () => {
@@ -82,11 +85,23 @@ function Measure({ wall }: { wall: Wall }) {
       {mayChange ? <SheetNotices sheet={sheet} onTakeTheirs={takeTheirs} /> : null}
       <Section title={view === 'marks' ? 'Straighten the photo' : 'The wall'} action={mayChange ? <Views wall={wall} view={view} onView={setView} /> : null}>
         {view === 'photo' ? <PhotoUpload wall={wall} onUploaded={() => setView('marks')} onWithout={() => setView('wall')} /> : null}
-        {view === 'marks' && wall.photo ? <StraightenPanel key={wall.photo.id} wall={wall} photo={wall.photo} onStraightened={() => setView('wall')} /> : null}
+        {view === 'marks' && wall.photo ? (
+          <StraightenPanel
+            key={wall.photo.id}
+            wall={wall}
+            photo={wall.photo}
+            moved={movedHere}
+            onMoved={(marks) => setMoved(marks && wall.photo ? { photoId: wall.photo.id, marks } : null)}
+            onStraightened={() => setView('wall')}
+          />
+        ) : null}
         {view === 'wall' ? (
-          <WallDrawing wall={shown} elevation={wall.photo?.elevation ?? null} siteMarks label={`${wall.name} from the front, with studs and obstructions`} className="max-h-[75dvh] w-full">
-            <WallGrid widthMm={shown.widthMm} heightMm={shown.heightMm} />
-          </WallDrawing>
+          <figure>
+            <WallDrawing wall={shown} elevation={wall.photo?.elevation ?? null} siteMarks label={`${wall.name} from the front, with studs and obstructions`} className="max-h-[75dvh] w-full">
+              <WallGrid widthMm={shown.widthMm} heightMm={shown.heightMm} />
+            </WallDrawing>
+            <WallLegend unconfirmed={open > 0} />
+          </figure>
         ) : null}
       </Section>
       {mayChange ? (
@@ -106,7 +121,7 @@ function Measure({ wall }: { wall: Wall }) {
       ) : (
         <WallFacts wall={wall} />
       )}
-      <LeaveGuard unsaved={sheet.changed} />
+      <LeaveGuard unsaved={sheet.changed || movedHere !== null} />
     </Page>
   );
 }

@@ -25,7 +25,7 @@ export function MarkPositions({ marks, onChange }: Props) {
       <fieldset>
         <legend className="mb-2 font-semibold text-ink-900">Marks on the corners of a rectangle</legend>
         <p className="mb-3 text-sm text-ink-700">Tape a level, square rectangle on the wall: equal diagonals prove it square.</p>
-        <div className="grid grid-cols-2 gap-3">
+        <div className="grid grid-cols-2 items-end gap-3">
           <LengthField label="Rectangle’s width" value={rectangle.widthMm} onChange={(widthMm) => setSide({ widthMm })} />
           <LengthField label="Rectangle’s height" value={rectangle.heightMm} onChange={(heightMm) => setSide({ heightMm })} />
           <LengthField label="Its left side from the wall’s left end" value={rectangle.leftMm} onChange={(leftMm) => setSide({ leftMm })} />

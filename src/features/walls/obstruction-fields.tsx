@@ -1,12 +1,13 @@
 import { Trash2 } from 'lucide-react';
 import type { Obstruction } from '../../../shared/walls/wall.ts';
-import { usualClearanceMm } from '../../../shared/walls/studs.ts';
+import { startingClearanceMm } from '../../../shared/walls/studs.ts';
 import { Button } from '../../components/button.tsx';
 import { LengthField } from '../../components/length-field.tsx';
 import { SelectField } from '../../components/select-field.tsx';
 import { Table, Td, Th } from '../../components/table.tsx';
 import { TextField } from '../../components/text-field.tsx';
 import { newId } from '../../lib/new-id.ts';
+import { useUnits } from '../../lib/units.ts';
 import type { DraftErrors, ObstructionDraft } from './wall-draft.ts';
 import { obstructionWords, optionsOf } from './wall-words.ts';
 
@@ -18,11 +19,12 @@ interface Props {
 
 /** What stands on or against the wall, as upright rectangles, and how far frames keep clear of it. */
 export function ObstructionFields({ obstructions, errors, onChange }: Props) {
+  const units = useUnits();
   const set = (id: string, change: Partial<ObstructionDraft>) => onChange(obstructions.map((o) => (o.id === id ? { ...o, ...change } : o)));
   const setKind = (o: ObstructionDraft, kind: Obstruction['kind']) =>
-    set(o.id, { kind, clearanceMm: o.clearanceMm === usualClearanceMm[o.kind] ? usualClearanceMm[kind] : o.clearanceMm });
+    set(o.id, { kind, clearanceMm: o.clearanceMm === startingClearanceMm(o.kind, units) ? startingClearanceMm(kind, units) : o.clearanceMm });
   const add = () =>
-    onChange([...obstructions, { id: newId(), kind: 'outlet', name: '', leftMm: null, bottomMm: null, widthMm: null, heightMm: null, clearanceMm: usualClearanceMm.outlet, outlineMm: null }]);
+    onChange([...obstructions, { id: newId(), kind: 'outlet', name: '', leftMm: null, bottomMm: null, widthMm: null, heightMm: null, clearanceMm: startingClearanceMm('outlet', units), outlineMm: null }]);
 
   return (
     <div className="grid gap-4">

@@ -12,8 +12,8 @@ export function SheetNotices({ sheet, onTakeTheirs }: { sheet: WallSheet; onTake
         <Notice kind="caution" live>
           <p className="font-bold">Someone saved this wall before you</p>
           <p className="mt-1">
-            Theirs has {sheet.overtaken.current.studs.length} studs and {sheet.overtaken.current.obstructions.length} obstructions; yours has{' '}
-            {sheet.draft.studs.length} and {sheet.draft.obstructions.length}. Yours is still here and not saved.
+            Studs: {sheet.overtaken.current.studs.length} in theirs, {sheet.draft.studs.length} in yours. Obstructions: {sheet.overtaken.current.obstructions.length} in theirs,{' '}
+            {sheet.draft.obstructions.length} in yours. Yours is still here and not saved.
           </p>
           <div className="mt-3 flex flex-wrap gap-3">
             <Button small onClick={onTakeTheirs}>

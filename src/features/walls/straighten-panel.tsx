@@ -1,32 +1,29 @@
-import { useRef, useState } from 'react';
+import { useRef } from 'react';
 import type { Photo, Wall } from '../../../shared/walls/wall.ts';
 import { Button } from '../../components/button.tsx';
 import { ErrorState } from '../../components/error-state.tsx';
-import { LeaveGuard } from '../../components/leave-guard.tsx';
 import { Notice } from '../../components/notice.tsx';
 import { ProgressBar } from '../../components/progress-bar.tsx';
 import { MarkPositions } from './mark-positions.tsx';
-import { inThisOrder, judge, marksOf } from './marks-draft.ts';
+import { inThisOrder, judge, type MarkDraft, marksOf } from './marks-draft.ts';
 import { PhotoMarks } from './photo-marks.tsx';
 import { useStraighten } from './walls.queries.ts';
 
 interface Props {
   wall: Wall;
   photo: Photo;
+  /** Marks as moved and typed since the photo was last straightened; kept by the page, so that they outlive this panel. */
+  moved: readonly MarkDraft[] | null;
+  onMoved: (marks: MarkDraft[] | null) => void;
   onStraightened: () => void;
 }
 
 /** Four marks on the photo, their places on the wall, and the straightening. */
-export function StraightenPanel({ wall, photo, onStraightened }: Props) {
-  const [marks, setMarks] = useState(() => marksOf(photo));
-  const [touched, setTouched] = useState(false);
+export function StraightenPanel({ wall, photo, moved, onMoved, onStraightened }: Props) {
+  const marks = moved ?? marksOf(photo);
   const straighten = useStraighten(wall, photo.id);
   const calledOff = useRef<AbortController | null>(null);
   const judged = judge(marks, photo, wall);
-  const change = (next: typeof marks) => {
-    setTouched(true);
-    setMarks(next);
-  };
   const run = () => {
     if (judged.state !== 'fit') return;
     const controller = new AbortController();
@@ -35,7 +32,7 @@ export function StraightenPanel({ wall, photo, onStraightened }: Props) {
       { marks: judged.marks, signal: controller.signal },
       {
         onSuccess: () => {
-          setTouched(false);
+          onMoved(null);
           onStraightened();
         },
       },
@@ -52,15 +49,15 @@ export function StraightenPanel({ wall, photo, onStraightened }: Props) {
         photo={photo}
         marks={marks}
         wanting={judged.state === 'trouble' ? judged.trouble.which : []}
-        onMove={(index, px) => change(marks.map((m, i) => (i === index ? { ...m, px } : m)))}
+        onMove={(index, px) => onMoved(marks.map((m, i) => (i === index ? { ...m, px } : m)))}
       />
       <div className="grid gap-4">
-        <MarkPositions marks={marks} onChange={change} />
+        <MarkPositions marks={marks} onChange={onMoved} />
         {judged.state === 'trouble' ? (
           <Notice kind="caution" live>
             <p>{judged.trouble.words}</p>
             {judged.trouble.order ? (
-              <Button small className="mt-2" onClick={() => change(inThisOrder(marks, judged.trouble.order ?? []))}>
+              <Button small className="mt-2" onClick={() => onMoved(inThisOrder(marks, judged.trouble.order ?? []))}>
                 Use this order
               </Button>
             ) : null}
@@ -78,7 +75,6 @@ export function StraightenPanel({ wall, photo, onStraightened }: Props) {
           </p>
         </div>
       </div>
-      <LeaveGuard unsaved={touched && !straighten.isPending} />
     </div>
   );
 }

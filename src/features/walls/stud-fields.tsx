@@ -38,9 +38,9 @@ export function StudFields({ draft, errors, onChange }: Props) {
           <thead>
             <tr>
               <Th>Centre from the left</Th>
-              <Th>Face width</Th>
               <Th>Found by</Th>
               <Th>Off by at most</Th>
+              <Th>Face width</Th>
               <Th>
                 <span className="sr-only">Take out</span>
               </Th>
@@ -55,7 +55,6 @@ export function StudFields({ draft, errors, onChange }: Props) {
               return (
                 <tr key={stud.id}>
                   <Td>{field('xMm', 'centre from the left')}</Td>
-                  <Td>{field('widthMm', 'face width')}</Td>
                   <Td>
                     <SelectField
                       className="min-w-40 [&>label]:sr-only"
@@ -66,6 +65,7 @@ export function StudFields({ draft, errors, onChange }: Props) {
                     />
                   </Td>
                   <Td>{field('uncertaintyMm', 'off by at most')}</Td>
+                  <Td>{field('widthMm', 'face width')}</Td>
                   <Td>
                     <Button weight="quiet" aria-label={`Take out stud ${i + 1}`} onClick={() => onChange(studs.filter((s) => s.id !== stud.id))}>
                       <Trash2 aria-hidden="true" className="size-4" />

@@ -88,10 +88,10 @@ export function drawable(draft: WallDraft, wall: Wall): Wall {
     widthMm: known(draft.widthMm, wall.widthMm),
     heightMm: known(draft.heightMm, wall.heightMm),
     studs: draft.studs.flatMap((s) => { const read = Stud.safeParse(s); return read.success ? [read.data] : []; }),
-    obstructions: draft.obstructions.flatMap(({ outlineMm, ...o }) => {
-      if (outlineMm) return [{ ...o, outlineMm, clearanceMm: o.clearanceMm ?? 0 }];
+    obstructions: draft.obstructions.flatMap((o) => {
       const read = Rectangle.safeParse(o);
-      return read.success ? [{ id: o.id, kind: o.kind, name: o.name, clearanceMm: o.clearanceMm ?? 0, outlineMm: rectangleOutline(read.data) }] : [];
+      const outlineMm = o.outlineMm ?? (read.success ? rectangleOutline(read.data) : null);
+      return outlineMm ? [{ id: o.id, kind: o.kind, name: o.name, outlineMm, clearanceMm: o.clearanceMm ?? 0 }] : [];
     }),
   };
 }

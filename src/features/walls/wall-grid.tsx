@@ -12,7 +12,7 @@ export function WallGrid({ widthMm, heightMm }: { widthMm: number; heightMm: num
   const step = stepMm[units];
   const lines = (span: number) => Array.from({ length: Math.floor(span / step) }, (_, i) => (i + 1) * step).filter((at) => at < span - 1);
   const size = Math.max(widthMm, heightMm) * 0.016;
-  const words = { fontSize: size, strokeWidth: size / 4, className: 'fill-ink-900 stroke-white [paint-order:stroke] tabular-nums' };
+  const words = { fontSize: size, strokeWidth: size / 4, className: 'fill-ink-900 stroke-white [paint-order:stroke] tabular-nums max-sm:hidden' };
   return (
     <g aria-hidden="true">
       <g className="stroke-ink-900/25" strokeWidth="1">
@@ -38,5 +38,16 @@ export function WallGrid({ widthMm, heightMm }: { widthMm: number; heightMm: num
         ) : null,
       )}
     </g>
+  );
+}
+
+/** What the lines of the drawing are, below it. */
+export function WallLegend({ unconfirmed }: { unconfirmed: boolean }) {
+  const units = useUnits();
+  return (
+    <figcaption className="mt-2 text-sm text-ink-700">
+      Grid lines every {formatLength(stepMm[units], units)} from the left end and the floor. Dashed pairs are studs
+      {unconfirmed ? <>; <span className="font-bold text-chalk-700">?</span> marks one that nobody has confirmed yet</> : null}. Hatching is what stands in the way.
+    </figcaption>
   );
 }

@@ -1,0 +1,49 @@
+import { describe, expect, it } from 'vitest';
+import type { Wall } from '../../../shared/walls/wall.ts';
+import { bodyOf, drawable, draftOf, isChanged } from '../../../src/features/walls/wall-draft.ts';
+
+const uuid = (n: number) => `00000000-0000-4000-8000-00000000000${n}`;
+const wall: Wall = {
+  id: uuid(1), jobId: uuid(2), version: 3, name: 'Stair wall', widthMm: 3600, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7,
+  studs: [{ id: uuid(3), xMm: 406.4, widthMm: 38.1, foundBy: 'probe', uncertaintyMm: 3 }],
+  obstructions: [
+    { id: uuid(4), kind: 'outlet', name: '', outlineMm: [[300, 250], [370, 250], [370, 364], [300, 364]], clearanceMm: 50 },
+    { id: uuid(5), kind: 'trim', name: 'Stair string', outlineMm: [[0, 0], [900, 0], [0, 700]], clearanceMm: 10 },
+  ],
+  zones: [], photo: null,
+};
+
+describe('a wall’s sheet', () => {
+  it('opened and left alone changes nothing, a slanting outline with it', () => {
+    const draft = draftOf(wall);
+    expect(isChanged(draft, wall)).toBe(false);
+    expect(bodyOf(draft)).toEqual({ body: expect.objectContaining({ studs: wall.studs, obstructions: wall.obstructions, widthMm: 3600 }) });
+    expect(drawable(draft, wall)).toEqual(wall);
+  });
+
+  it('moves an outlet by its lower left corner', () => {
+    const draft = draftOf(wall);
+    draft.obstructions[0] = { ...draft.obstructions[0]!, leftMm: 1000 };
+    expect(isChanged(draft, wall)).toBe(true);
+    expect(bodyOf(draft)).toMatchObject({ body: { obstructions: [{ outlineMm: [[1000, 250], [1070, 250], [1070, 364], [1000, 364]] }, {}] } });
+  });
+
+  it('names every field that is empty, unread, or puts a stud off the wall, and sends nothing', () => {
+    const draft = draftOf(wall);
+    draft.name = ' ';
+    draft.heightMm = Number.NaN;
+    draft.obstructions[0] = { ...draft.obstructions[0]!, widthMm: null, heightMm: 0 };
+    const read = bodyOf(draft);
+    expect(Object.keys('errors' in read ? read.errors : {}).sort()).toEqual(['heightMm', 'name', 'obstructions.0.heightMm', 'obstructions.0.widthMm']);
+    const off = bodyOf({ ...draftOf(wall), widthMm: 300 });
+    expect(off).toEqual({ errors: { 'studs.0.xMm': expect.stringMatching(/off the wall/) } });
+  });
+
+  it('draws what can be read and leaves out what cannot', () => {
+    const draft = draftOf(wall);
+    draft.widthMm = null;
+    draft.studs.push({ id: uuid(6), xMm: null, widthMm: 38.1, foundBy: 'probe', uncertaintyMm: 3 });
+    draft.obstructions[0] = { ...draft.obstructions[0]!, leftMm: Number.NaN };
+    expect(drawable(draft, wall)).toMatchObject({ widthMm: 3600, studs: wall.studs, obstructions: [wall.obstructions[1]] });
+  });
+});
