@@ -56,7 +56,7 @@ export function SendDialog({ layout, client, frameCount, stops, readyVersion, on
   }
   return (
     <FormDialog
-      title={`Send ${layout.name} to the client`}
+      title={`Send “${layout.name}” to the client`}
       about={`${client.name} gets a mail at ${client.email} with a personal link, sees the layout on the wall, and can sign it or ask for changes.`}
       deed={`Send revision ${layout.letter}`}
       sheet={sheet}

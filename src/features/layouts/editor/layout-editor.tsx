@@ -46,7 +46,7 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
         {readOnly ? null : <FrameSheet designs={designs} wall={wall} />}
         <FindingsLedger findings={findings} />
         <FramesTable designs={designs} />
-        <WholeSizes designs={designs} wall={wall} />
+        <WholeSizes designs={designs} wall={wall} readOnly={readOnly} />
       </aside>
     </div>
   );

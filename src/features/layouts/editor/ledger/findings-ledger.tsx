@@ -1,3 +1,6 @@
+import { type ReactNode, useState } from 'react';
+import type { Frame } from '../../../../../shared/layouts/layout.ts';
+import { byLabel } from '../../../../../shared/layouts/naming.ts';
 import type { Figure } from '../../../../../shared/units/figure.ts';
 import { FigureText } from '../../../../components/figure-text.tsx';
 import { WeightMark } from '../../../../components/weight-mark.tsx';
@@ -62,36 +65,62 @@ export function FindingsLedger({ findings }: { findings: readonly ShownFinding[]
   );
 }
 
+/** Most findings of one rule that are written out before asking. */
+const mostShown = 20;
+
 function RuleGroup({ group: { weight, title, source, list } }: { group: Group }) {
   const store = useEditorStore();
   const frames = useEditor((e) => e.bench.frames);
+  // Stops stand open: nobody should have to look for what must not be hung.
+  const [open, setOpen] = useState(weight === 'stop');
+  const [all, setAll] = useState(false);
+  const labels = new Map(frames.map((f) => [f.id, f]));
   const frameIds = [...new Set(list.flatMap((f) => f.frameIds))];
   return (
-    // Stops stand open: nobody should have to look for what must not be hung.
-    <details open={weight === 'stop'} className="rounded-sm border border-plaster-200 bg-white">
+    <details open={open} onToggle={(event) => setOpen(event.currentTarget.open)} className="rounded-sm border border-plaster-200 bg-white">
       <summary className="flex cursor-pointer items-start gap-2 px-2 py-1.5 hover:text-chalk-700">
         <WeightMark weight={weight} />
         <span className="grow text-sm font-semibold">{title}</span>
         {list.length > 1 ? <span className="shrink-0 text-sm whitespace-nowrap text-ink-700 tabular-nums">× {list.length}</span> : null}
       </summary>
-      <ul className="grid gap-2 border-t border-plaster-200 px-2 py-2 text-sm text-ink-900">
-        {list.map((finding) => (
-          <li key={finding.id}>
-            <p>{finding.words}</p>
-            {finding.figures.map((figure) => (
-              <FigureText key={figure.label} figure={figure} />
-            ))}
-          </li>
-        ))}
-      </ul>
-      <p className="flex flex-wrap items-baseline justify-between gap-2 border-t border-plaster-200 px-2 py-1.5 text-xs text-ink-700">
-        <span>Source: {source}</span>
-        {frameIds.length > 0 ? (
-          <button type="button" onClick={() => store.dispatch({ kind: 'select', ids: frameIds })} className="min-h-6 font-semibold text-chalk-700 underline underline-offset-4">
-            Show {frameIds.length === 1 ? `frame ${frames.find((f) => f.id === frameIds[0])?.label ?? ''}` : `${frameIds.length} frames`}
-          </button>
-        ) : null}
-      </p>
+      {open ? (
+        <>
+          <ul className="grid gap-2 border-t border-plaster-200 px-2 py-2 text-sm text-ink-900">
+            {inLabelOrder(list, labels)
+              .slice(0, all ? undefined : mostShown)
+              .map((finding) => (
+                <li key={finding.id}>
+                  <p>{finding.words}</p>
+                  {finding.figures.map((figure) => (
+                    <FigureText key={figure.label} figure={figure} />
+                  ))}
+                </li>
+              ))}
+          </ul>
+          <p className="flex flex-wrap items-baseline justify-between gap-x-3 border-t border-plaster-200 px-2 py-1.5 text-xs text-ink-700">
+            <span>Source: {source}</span>
+            {list.length > mostShown && !all ? <Deed onPress={() => setAll(true)}>All {list.length}</Deed> : null}
+            {frameIds.length > 0 ? (
+              <Deed onPress={() => store.dispatch({ kind: 'select', ids: frameIds })}>
+                Show {frameIds.length === 1 ? `frame ${labels.get(frameIds[0]!)?.label ?? ''}` : `${frameIds.length} frames`}
+              </Deed>
+            ) : null}
+          </p>
+        </>
+      ) : null}
     </details>
+  );
+}
+
+function inLabelOrder(list: readonly ShownFinding[], frames: ReadonlyMap<string, Frame>): ShownFinding[] {
+  const label = (finding: ShownFinding) => ({ label: frames.get(finding.frameIds[0] ?? '')?.label ?? '' });
+  return [...list].sort((a, b) => byLabel(label(a), label(b)));
+}
+
+function Deed({ onPress, children }: { onPress: () => void; children: ReactNode }) {
+  return (
+    <button type="button" onClick={onPress} className="min-h-6 font-semibold text-chalk-700 underline underline-offset-4">
+      {children}
+    </button>
   );
 }

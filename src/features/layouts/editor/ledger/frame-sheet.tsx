@@ -6,6 +6,7 @@ import { formatAngle } from '../../../../../shared/units/angle.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
 import { Button } from '../../../../components/button.tsx';
 import { TextField } from '../../../../components/text-field.tsx';
+import { newId } from '../../../../lib/new-id.ts';
 import * as operation from '../operations/operations.ts';
 import { type Designs, wallOutline } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
@@ -28,7 +29,7 @@ export function FrameSheet({ designs, wall }: { designs: Designs; wall: Wall }) 
   const turn = (way: 1 | -1) =>
     doIt('turned', operation.turnBy(frames, selected, only ? nextStepRad(only.turnRad, sides, way) - only.turnRad : way * turnStepRad(sides)));
   const duplicate = () => {
-    const ids = chosen.map(() => crypto.randomUUID());
+    const ids = chosen.map(newId);
     const { sheet } = store.getState().bench;
     doIt('duplicated', operation.duplicate(frames, selected, ids, sheet, (f) => wallOutline(f, designs), wall.widthMm), ids);
   };
@@ -59,6 +60,7 @@ export function FrameSheet({ designs, wall }: { designs: Designs; wall: Wall }) 
           Remove
         </Deed>
       </div>
+      {only ? null : <HungTogether frames={chosen} />}
       {only ? <OneFrame key={only.id} frame={only} /> : null}
     </section>
   );
@@ -96,6 +98,26 @@ function OneFrame({ frame }: { frame: Frame }) {
       />
       {problem ? <p className="col-span-2 text-sm font-semibold text-madder-600">{problem}</p> : null}
     </div>
+  );
+}
+
+/** Frames screwed to one another hang as one body: the checks reckon with it. */
+function HungTogether({ frames }: { frames: readonly Frame[] }) {
+  const store = useEditorStore();
+  const group = frames[0]?.hungGroup ?? null;
+  const together = group !== null && frames.every((f) => f.hungGroup === group);
+  const set = () => {
+    const { bench } = store.getState();
+    const edits = operation.hangTogether(bench.frames, frames.map((f) => f.id), !together);
+    store.act(together ? 'Frames hang apart again' : `${frames.length} frames hang as one`, edits);
+  };
+  return (
+    <p className="mt-3 flex flex-wrap items-center gap-3 text-sm text-ink-700">
+      <Button small onClick={set}>
+        {together ? 'Hang apart' : 'Hang as one'}
+      </Button>
+      {together ? 'Screwed to one another: one body over all its hangers.' : 'For frames screwed to one another.'}
+    </p>
   );
 }
 

@@ -1,10 +1,12 @@
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
+import { LayoutSheet } from '../../../../../shared/layouts/layout.ts';
 import { byLabel } from '../../../../../shared/layouts/naming.ts';
 import { formatAngle } from '../../../../../shared/units/angle.ts';
 import { formatLength } from '../../../../../shared/units/length.ts';
 import { Table, Td, Th } from '../../../../components/table.tsx';
+import { TextField } from '../../../../components/text-field.tsx';
 import { useUnits } from '../../../../lib/units.ts';
-import { boxRound } from '../operations/operations.ts';
+import { boxRound, changeSheet } from '../operations/operations.ts';
 import { type Designs, wallOutline } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
 
@@ -63,12 +65,11 @@ export function FramesTable({ designs }: { designs: Designs }) {
 }
 
 /** How large all frames together are, and how far from the wall's edges. */
-export function WholeSizes({ designs, wall }: { designs: Designs; wall: { widthMm: number; heightMm: number } }) {
+export function WholeSizes({ designs, wall, readOnly }: { designs: Designs; wall: { widthMm: number; heightMm: number }; readOnly: boolean }) {
   const units = useUnits();
   const frames = useEditor((e) => e.bench.frames);
   const box = useMemo(() => boxRound(frames, (f) => wallOutline(f, designs)), [frames, designs]);
-  if (!box) return null;
-  const rows: [string, number][] = [
+  const rows: [string, number][] = !box ? [] : [
     ['Width', box.right - box.left],
     ['Height', box.top - box.bottom],
     ['From left edge', box.left],
@@ -87,6 +88,32 @@ export function WholeSizes({ designs, wall }: { designs: Designs; wall: { widthM
           </div>
         ))}
       </dl>
+      {readOnly ? null : <LayoutName />}
     </section>
+  );
+}
+
+/** The layout's name, as the client will read it; takes effect when the field is left. */
+function LayoutName() {
+  const store = useEditorStore();
+  const sheet = useEditor((e) => e.bench.sheet);
+  const [typed, setTyped] = useState<string | null>(null);
+  const read = LayoutSheet.shape.name.safeParse(typed ?? sheet.name);
+  const finish = () => {
+    if (typed === null || !read.success) return;
+    setTyped(null);
+    if (read.data !== sheet.name) store.act('Layout renamed', changeSheet(sheet, { name: read.data }));
+  };
+  return (
+    <div className="mt-3" onKeyDown={(event) => (event.key === 'Enter' ? finish() : undefined)}>
+      <TextField
+        label="Name of the layout"
+        maxLength={80}
+        value={typed ?? sheet.name}
+        error={read.success ? undefined : read.error.issues[0]?.message}
+        onChange={(event) => setTyped(event.target.value)}
+        onBlur={finish}
+      />
+    </div>
   );
 }

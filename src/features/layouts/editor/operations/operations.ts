@@ -94,6 +94,15 @@ export function change(frames: readonly Frame[], frameId: string, to: Partial<Om
   return [changed(frame, { ...after, turnRad: plainTurnRad(after.turnRad) })];
 }
 
+/** Declares frames one hung group under a name of its own, or each by itself again. */
+export function hangTogether(frames: readonly Frame[], ids: readonly string[], together: boolean): Edit[] {
+  const names = new Set(frames.map((f) => f.hungGroup));
+  let number = 1;
+  while (names.has(`group ${number}`)) number++;
+  const hungGroup = together ? `group ${number}` : null;
+  return chosen(frames, ids).map((frame) => changed(frame, { ...frame, hungGroup }));
+}
+
 /** Changes the layout's name or reveal. */
 export function changeSheet(before: LayoutSheet, to: Partial<LayoutSheet>): Edit[] {
   return [{ kind: 'sheet', before, after: { ...before, ...to } }];

@@ -56,6 +56,7 @@ export function SiteLayer({ wall }: { wall: Wall }) {
 
 const shadows = new WeakMap<Placement, ReturnType<typeof shadowDrawing>>();
 const labelPx = 14;
+const leastLabelledPx = 15;
 
 function paintFrame(context: CanvasRenderingContext2D, pattern: ReadyPattern, at: Placement, pxPerMm: number, hangers: boolean): void {
   context.save();
@@ -86,7 +87,10 @@ export function FramesLayer({ designs }: { designs: Designs }) {
       const still = frames.filter((f) => !held.has(f.id) && designs.has(f.patternId));
       for (const frame of still) paintShadow(context, designs.get(frame.patternId)!, frame, pxPerMm);
       for (const frame of still) paintFrame(context, designs.get(frame.patternId)!, frame, pxPerMm, hangers);
-      for (const frame of still) paintLabel(context, frame, pxPerMm);
+      for (const frame of still) {
+        // Too small to read is left out: the ledger has them all.
+        if (designs.get(frame.patternId)!.radiusMm * pxPerMm > leastLabelledPx) paintLabel(context, frame, pxPerMm);
+      }
     },
     [frames, designs, hangers, heldKey],
   );

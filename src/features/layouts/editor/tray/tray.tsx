@@ -3,14 +3,13 @@ import { boxOf } from '../../../../../shared/geometry/polygon.ts';
 import { nextPlace } from '../../../../../shared/layouts/next-place.ts';
 import { formatLength } from '../../../../../shared/units/length.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
+import { newId } from '../../../../lib/new-id.ts';
 import { useUnits } from '../../../../lib/units.ts';
 import { carryFromTray } from '../gestures/from-tray.ts';
 import { place } from '../operations/operations.ts';
 import { type Designs, type ReadyPattern, wallOutline } from '../state/designs.ts';
 import { type EditorStore, useEditorStore } from '../state/editor-store.ts';
 import { PatternPicture } from './pattern-picture.tsx';
-
-const newId = () => crypto.randomUUID();
 
 /** Places a pattern without a hand: beside the frame chosen, else beside the last one. */
 export function placeNext(store: EditorStore, designs: Designs, pattern: ReadyPattern, wall: Wall): void {
