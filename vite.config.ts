@@ -7,6 +7,8 @@ const apiOrigin = process.env.API_ORIGIN ?? 'http://127.0.0.1:4310';
 export default defineConfig({
   plugins: [react(), tailwindcss()],
   publicDir: false,
+  // The server puts a fresh nonce in the place of this at every page it serves.
+  html: { cspNonce: '%CSP_NONCE%' },
   build: { outDir: 'dist', emptyOutDir: true, chunkSizeWarningLimit: 700 },
   server: { proxy: { '/api': apiOrigin } },
   test: {

@@ -1,9 +1,9 @@
-import { randomUUID } from 'node:crypto';
-import { existsSync } from 'node:fs';
+import { randomBytes, randomUUID } from 'node:crypto';
+import { existsSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import compression from 'compression';
 import cookieParser from 'cookie-parser';
-import express, { type Express, type Request } from 'express';
+import express, { type Express, type Request, type Response } from 'express';
 import helmet from 'helmet';
 import type { Logger } from 'pino';
 import { developmentApi } from '../shared/api/development.api.ts';
@@ -73,6 +73,7 @@ export function createApp(parts: Parts): { app: Express; mounted: Mounted[]; roo
   app.set('query parser', 'simple');
   app.use((req, res, next) => {
     res.locals.requestId = randomUUID();
+    res.locals.nonce = randomBytes(16).toString('base64');
     res.set('X-Request-Id', res.locals.requestId as string);
     const started = performance.now();
     res.on('finish', () => log.debug({ requestId: res.locals.requestId, method: req.method, path: withoutToken(req.path), status: res.statusCode, ms: Math.round(performance.now() - started) }, 'request'));
@@ -112,6 +113,12 @@ export function createApp(parts: Parts): { app: Express; mounted: Mounted[]; roo
     if (!mail) throw notFound('message');
     return mail;
   });
+  mount.on(developmentApi.mailPage, async ({ params, res }) => {
+    const mail = await parts.fakeMail?.read(params.mailId);
+    if (!mail) throw notFound('message');
+    // As a mail reader would show it: its own inline styles, and nothing else.
+    res.set('Content-Security-Policy', "default-src 'none'; style-src 'unsafe-inline'; frame-ancestors 'self'; sandbox allow-popups allow-top-navigation-by-user-activation").type('html').send(mail.html ?? '');
+  });
   peopleRoutes(mount, rooms.people, cookies);
   jobsRoutes(mount, rooms.jobs);
   hardwareRoutes(mount, rooms.hardware);
@@ -146,13 +153,17 @@ function createRooms({ config, data, outbox, pool, clock, bcryptCost }: Parts) {
 }
 export type Rooms = ReturnType<typeof createRooms>;
 
+/** The one style sheet that the toaster library writes into the page, by its hash (it takes no nonce), and an empty one. */
+const toasterStyles = ["'sha256-StEaX+se6YS7pqjzrzMIA0KaX9zF/8zAhvQXZAe5epY='", "'sha256-47DEQpj8HBSa+/TImW+5JCeuQeRkm5NMpJWZG3hSuFU='"];
+
 function securityHeaders(config: Config) {
   const https = config.appOrigin.startsWith('https:');
+  const styleSrc = ["'self'", (_req: unknown, res: unknown) => `'nonce-${(res as Response).locals.nonce as string}'`, ...toasterStyles];
   return helmet({
     contentSecurityPolicy: {
       useDefaults: false,
       directives: {
-        defaultSrc: ["'self'"], scriptSrc: ["'self'"], styleSrc: ["'self'"], imgSrc: ["'self'", 'blob:', 'data:'], fontSrc: ["'self'"],
+        defaultSrc: ["'self'"], scriptSrc: ["'self'"], styleSrc, imgSrc: ["'self'", 'blob:', 'data:'], fontSrc: ["'self'"],
         connectSrc: ["'self'"], objectSrc: ["'none'"], baseUri: ["'none'"], frameAncestors: ["'none'"], formAction: ["'self'"], workerSrc: ["'self'", 'blob:'],
         ...(https ? { upgradeInsecureRequests: [] } : {}),
       },
@@ -169,7 +180,10 @@ function servePages(app: Express): void {
   if (!existsSync(path.join(dist, 'index.html'))) return;
   app.use('/assets', express.static(path.join(dist, 'assets'), { immutable: true, maxAge: '365d', fallthrough: false }));
   app.use(express.static(dist, { index: false, maxAge: 0 }));
-  app.get('/{*page}', (_req, res) => res.set('Cache-Control', 'no-cache').sendFile(path.join(dist, 'index.html')));
+  const page = readFileSync(path.join(dist, 'index.html'), 'utf8');
+  app.get('/{*page}', (_req, res) => {
+    res.set('Cache-Control', 'no-store').type('html').send(page.replaceAll('%CSP_NONCE%', res.locals.nonce as string));
+  });
 }
 
 /** A client's token opens doors: it stays out of the log. */

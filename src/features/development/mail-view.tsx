@@ -1,5 +1,6 @@
 import type { z } from 'zod';
-import type { Mail } from '../../../shared/api/development.api.ts';
+import { developmentApi, type Mail } from '../../../shared/api/development.api.ts';
+import { addressOf } from '../../lib/call.ts';
 import { momentOf } from '../../lib/dates.ts';
 import { linkedText } from './linked-text.ts';
 
@@ -27,7 +28,7 @@ export function MailView({ mail }: { mail: z.infer<typeof Mail> }) {
       {mail.html ? (
         <details className="border-t border-plaster-200">
           <summary className="cursor-pointer px-4 py-2 font-semibold text-chalk-600">Show the HTML form</summary>
-          <iframe title="HTML form of the message" srcDoc={mail.html} sandbox="allow-popups allow-popups-to-escape-sandbox" className="h-96 w-full border-t border-plaster-200" />
+          <iframe title="HTML form of the message" src={addressOf(developmentApi.mailPage, { params: { mailId: mail.id } })} sandbox="allow-popups allow-popups-to-escape-sandbox" className="h-96 w-full border-t border-plaster-200" />
         </details>
       ) : null}
     </article>

@@ -13,6 +13,7 @@ const table: Record<string, string> = {
   'get /api/openapi.json': 'omhn',
   'get /api/development/mailbox': 'omhn',
   'get /api/development/mailbox/:mailId': 'omhn',
+  'get /api/development/mailbox/:mailId/page': 'omhn',
   'post /api/people/register': 'omhn',
   'post /api/people/sign-in': 'omhn',
   'post /api/people/refresh': 'omhn',
