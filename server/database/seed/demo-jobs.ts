@@ -3,7 +3,8 @@ import { readFileSync } from 'node:fs';
 import path from 'node:path';
 import { z } from 'zod';
 import type { Frame } from '../../../shared/layouts/layout.ts';
-import { usualClearanceMm, usualUncertaintyMm } from '../../../shared/walls/studs.ts';
+import { startingClearanceMm, usualUncertaintyMm } from '../../../shared/walls/studs.ts';
+import { demoShop } from './accounts.ts';
 import type { Mark, Obstruction, Stud, Zone } from '../../../shared/walls/wall.ts';
 
 const pair = z.tuple([z.number(), z.number()]);
@@ -31,7 +32,7 @@ export function demoScene(name: string) {
     }),
     obstructions: scene.objects.map(({ id, kind, rectMm: r }): Obstruction => {
       const known = kind === 'door' || kind === 'window' ? 'opening' : (kind as Obstruction['kind']);
-      return { id: randomUUID(), kind: known, name: id.replace('-', ' '), clearanceMm: usualClearanceMm[known], outlineMm: [[r.x, r.y], [r.x + r.width, r.y], [r.x + r.width, r.y + r.height], [r.x, r.y + r.height]] };
+      return { id: randomUUID(), kind: known, name: id.replace('-', ' '), clearanceMm: startingClearanceMm(known, demoShop.units), outlineMm: [[r.x, r.y], [r.x + r.width, r.y], [r.x + r.width, r.y + r.height], [r.x, r.y + r.height]] };
     }),
   };
 }
