@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs';
-import { expect, test } from '@playwright/test';
+import { expect, test, type FileChooser } from '@playwright/test';
 
 const scene = 'server/database/seed/scenes/calibration-wall';
 interface Scene {
@@ -73,7 +73,7 @@ test('a maker measures a wall: photo, four marks, straightened picture, studs, a
     await expect(page.getByLabel('Obstruction 1: from the left')).toHaveValue('1130 mm');
   });
 
-  async function choose(file: Parameters<Awaited<ReturnType<typeof page.waitForEvent<'filechooser'>>>['setFiles']>[0]) {
+  async function choose(file: Parameters<FileChooser['setFiles']>[0]) {
     const [chooser] = await Promise.all([page.waitForEvent('filechooser'), page.getByRole('button', { name: 'Choose a photo' }).click()]);
     await chooser.setFiles(file);
   }
