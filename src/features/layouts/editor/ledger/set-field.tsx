@@ -10,6 +10,7 @@ interface Props {
   value: number | null;
   /** Called when the field is left or Enter is pressed with something new and readable in it. */
   onSet: (value: number | null) => void;
+  hint?: string;
   error?: string;
   optional?: boolean;
   disabled?: boolean;
