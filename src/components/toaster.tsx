@@ -6,6 +6,7 @@ export function Toaster() {
     <Parts
       position="bottom-right"
       duration={5000}
+      style={{ fontFamily: 'inherit' }}
       toastOptions={{
         unstyled: true,
         classNames: {

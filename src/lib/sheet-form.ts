@@ -23,23 +23,33 @@ export interface SheetForm<In extends FieldValues, Out extends FieldValues> {
 
 /** A form over one schema: checked here by it before it is sent, and the server's word on fields put beside them. */
 export function useSheetForm<In extends FieldValues, Out extends FieldValues>({ schema, defaultValues, send }: Sheet<In, Out>): SheetForm<In, Out> {
-  const form = useForm<In, unknown, Out>({ resolver: zodResolver(schema), defaultValues, mode: 'onTouched' });
+  const form = useForm<In, unknown, Out>({ resolver: zodResolver(schema), defaultValues, mode: 'onTouched', shouldFocusError: false });
   const [failure, setFailure] = useState<unknown>(null);
   const { isSubmitting, isDirty, isSubmitSuccessful } = form.formState;
-  const submit = form.handleSubmit(async (values) => {
+  const check = form.handleSubmit(async (values) => {
     setFailure(null);
     try {
       await send(values);
     } catch (error) {
       const known = fieldsOf(error).filter(({ path }) => knownField(path, form.getValues()));
-      for (const { path, words } of known) form.setError(path as Path<In>, { type: 'server', message: words }, { shouldFocus: true });
+      for (const { path, words } of known) form.setError(path as Path<In>, { type: 'server', message: words });
       if (known.length === 0) {
         form.setError('root' as Path<In>, { type: 'server' });
         setFailure(error);
       }
     }
   });
+  const submit = async (event?: BaseSyntheticEvent) => {
+    const place: unknown = event?.currentTarget;
+    await check(event);
+    if (place instanceof HTMLElement) focusFirstFault(place);
+  };
   return { form, submit, failure, sending: isSubmitting, unsaved: isDirty && !isSubmitting && !isSubmitSuccessful };
+}
+
+/** Brings the reader to the first field that is refused, once the page shows which: also those that no `register` knows. */
+function focusFirstFault(place: HTMLElement): void {
+  requestAnimationFrame(() => place.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus());
 }
 
 function fieldsOf(error: unknown): { path: string; words: string }[] {

@@ -14,6 +14,7 @@ import { JobMenu } from '../features/jobs/job-menu.tsx';
 import { layoutsOfJobQuery, wallsOfJobQuery } from '../features/jobs/job-parts.queries.ts';
 import { JobState } from '../features/jobs/job-states.tsx';
 import { jobQuery } from '../features/jobs/jobs.queries.ts';
+import { leadingLayout } from '../features/jobs/leading-layout.ts';
 import { LayoutSlips } from '../features/jobs/layout-slips.tsx';
 import { NewLayoutDialog } from '../features/jobs/new-layout-dialog.tsx';
 import { NewWallDialog } from '../features/jobs/new-wall-dialog.tsx';
@@ -46,7 +47,7 @@ export function JobPage() {
     return <Page>{job.isError ? <ErrorState error={job.error} onRetry={() => void job.refetch()} /> : <Loading what="the job" />}</Page>;
   }
   const wallOf = (wallId: string) => walls.data?.find((wall) => wall.id === wallId);
-  const newest = layouts.data ? [...layouts.data].sort((a, b) => (a.updatedAt < b.updatedAt ? 1 : -1))[0] : undefined;
+  const newest = leadingLayout(layouts.data ?? []);
   const addWall = () => setDialog('wall');
   const startLayout = () => setDialog('layout');
 

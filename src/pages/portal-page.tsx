@@ -36,7 +36,7 @@ export function PortalPage() {
             <p className="max-w-prose text-ink-700">{introduction(portal.data.revisions)}</p>
             {portal.data.revisions.length === 0 ? <EmptyState title="Nothing to look at yet">The shop has not put an option here. They will write again.</EmptyState> : null}
             {portal.data.revisions.map((revision) => (
-              <PortalOption key={revision.id} token={token} consent={portal.data.consent} revision={revision} picture={<OptionPicture revision={revision} />} />
+              <PortalOption key={revision.id} token={token} consent={portal.data.consent} revision={revision} signedInstead={signedInstead(portal.data.revisions, revision)} picture={<OptionPicture revision={revision} />} />
             ))}
             <p className="border-t border-plaster-200 pt-3 text-sm text-ink-700">This page is personal: whoever has its address can answer in your name. Pass it on only to those who decide with you.</p>
           </UnitsContext>
@@ -56,6 +56,10 @@ function introduction(revisions: readonly PortalRevision[]): string {
   return open === 1
     ? 'This is how it would look on your wall, drawn to scale. Look it over, then sign it or say what should change.'
     : `These ${open} options are drawn to scale on your wall. Look them over, then sign one or say what should change.`;
+}
+
+function signedInstead(revisions: readonly PortalRevision[], than: PortalRevision): string | null {
+  return revisions.find((revision) => revision.id !== than.id && revision.state === 'signed')?.layoutName ?? null;
 }
 
 function OptionPicture({ revision }: { revision: PortalRevision }) {

@@ -1,6 +1,7 @@
+import { useWatch } from 'react-hook-form';
 import { toast } from 'sonner';
 import { peopleApi } from '../../../shared/people/people.api.ts';
-import { roles } from '../../../shared/people/permissions.ts';
+import { type Role, roles } from '../../../shared/people/permissions.ts';
 import { FormDialog } from '../../components/form-dialog.tsx';
 import { SelectField } from '../../components/select-field.tsx';
 import { TextField } from '../../components/text-field.tsx';
@@ -13,14 +14,15 @@ export function AddMemberDialog({ onClose }: { onClose: () => void }) {
   const add = useAddMember();
   const sheet = useSheetForm({
     schema: peopleApi.addMember.body,
-    defaultValues: { name: '', email: '', role: 'maker', password: '' },
+    defaultValues: { name: '', email: '', role: 'maker' as Role, password: '' },
     send: async (body) => {
       const member = await add.mutateAsync(body);
       toast.success(`${member.name} can sign in now`);
       onClose();
     },
   });
-  const { register, formState } = sheet.form;
+  const { register, control, formState } = sheet.form;
+  const role = useWatch({ control, name: 'role' });
   const { errors } = formState;
   return (
     <FormDialog title="Add a person" about="Tell them the first password yourself; it is not mailed." deed="Add the person" sheet={sheet} onClose={onClose}>
@@ -28,7 +30,8 @@ export function AddMemberDialog({ onClose }: { onClose: () => void }) {
       <TextField label="E-mail" type="email" autoComplete="off" error={errors.email?.message} {...register('email')} />
       <SelectField
         label="Role"
-        options={roles.map((role) => ({ value: role, words: `${roleWords[role].name}: ${roleWords[role].does}` }))}
+        options={roles.map((role) => ({ value: role, words: roleWords[role].name }))}
+        hint={`Someone who ${roleWords[role as Role].does}.`}
         error={errors.role?.message}
         {...register('role')}
       />

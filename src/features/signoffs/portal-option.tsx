@@ -11,12 +11,14 @@ interface Props {
   token: string;
   consent: string;
   revision: PortalRevision;
+  /** Name of another option that was signed, or null. */
+  signedInstead: string | null;
   /** The layout on the wall. */
   picture: ReactNode;
 }
 
 /** One option as the client sees it: the drawing, the sizes in words, and what can be answered. */
-export function PortalOption({ token, consent, revision, picture }: Props) {
+export function PortalOption({ token, consent, revision, signedInstead, picture }: Props) {
   const { snapshot } = revision;
   const sizes = plainSizes(snapshot, useUnits());
   return (
@@ -30,7 +32,7 @@ export function PortalOption({ token, consent, revision, picture }: Props) {
         </p>
       </header>
       <figure className="border border-plaster-200 bg-plaster-100 p-2">{picture}</figure>
-      <Standing revision={revision} />
+      <Standing revision={revision} signedInstead={signedInstead} />
       {snapshot.note ? (
         <div>
           <h3 className="text-sm font-semibold text-ink-700">A word from the shop</h3>
@@ -60,7 +62,7 @@ export function PortalOption({ token, consent, revision, picture }: Props) {
 }
 
 /** Where the option stands, once it has been answered or replaced. */
-function Standing({ revision }: { revision: PortalRevision }) {
+function Standing({ revision, signedInstead }: Pick<Props, 'revision' | 'signedInstead'>) {
   switch (revision.state) {
     case 'signed':
       return (
@@ -88,7 +90,7 @@ function Standing({ revision }: { revision: PortalRevision }) {
       return (
         <Notice live>
           <p className="font-bold">No longer open</p>
-          <p>The shop has sent something newer in place of this option.</p>
+          <p>{signedInstead ? `${signedInstead} was signed in place of this option.` : 'The shop has put something newer in place of this option.'}</p>
         </Notice>
       );
     default:
