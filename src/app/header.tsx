@@ -21,7 +21,7 @@ export function Header({ me }: { me: Me }) {
   ];
   return (
     <header data-screen-only className="flex flex-wrap items-center gap-x-6 border-b border-ink-700 bg-plaster-100 px-4 sm:px-6">
-      <p className="flex min-w-0 items-center gap-2 py-2 font-bold text-ink-900">
+      <p className="flex min-w-0 flex-1 items-center gap-2 py-2 font-bold text-ink-900 sm:flex-none">
         <img src={mark} alt="" className="size-6" />
         <span className="truncate">{me.shop.name}</span>
       </p>
@@ -41,7 +41,7 @@ export function Header({ me }: { me: Me }) {
           </NavLink>
         ))}
       </nav>
-      <div className="ml-auto">
+      <div className="ml-auto shrink-0">
         <AccountMenu me={me} />
       </div>
     </header>
@@ -61,7 +61,7 @@ function AccountMenu({ me }: { me: Me }) {
     }
   };
   return (
-    <Menu label={<span className="max-w-40 truncate">{me.name}</span>} name={`${me.name}: account`}>
+    <Menu label={<span className="max-w-28 truncate sm:max-w-48">{me.name}</span>} name={`${me.name}: account`}>
       <MenuWords>
         {me.email}
         <br />
