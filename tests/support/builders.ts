@@ -16,7 +16,7 @@ export function aDesign(change: Partial<PatternDesign> = {}): PatternDesign {
 }
 
 export function aWallShape(change: Partial<WallShape> = {}): WallShape {
-  return { name: 'Long wall', widthMm: 3600, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7, ...change };
+  return { name: 'Long wall', widthMm: 3600, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7, studSpecies: 'spruce-pine-fir', ...change };
 }
 
 export function aStud(xMm: number, change: Partial<Stud> = {}): Stud {

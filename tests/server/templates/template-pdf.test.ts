@@ -6,7 +6,8 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import template from '../../../server/workers/tasks/template.ts';
 import type { TemplateInput } from '../../../shared/templates/template-input.ts';
 import { aHexagon, aTemplate } from '../../shared/templates/a-template.ts';
-import { dotsPerMm, PrintedPage } from './printed-page.ts';
+import { PrintedPage } from '../../support/printed-page.ts';
+import { pdfFacts, readSheets, type PrintedSheet } from '../../support/printed-template.ts';
 
 let folder: string;
 beforeAll(() => {
@@ -21,59 +22,10 @@ async function print(input: TemplateInput): Promise<string> {
   return file;
 }
 
-function info(pdf: string): { sizesPt: [number, number][]; text: string } {
-  const text = execFileSync('pdfinfo', ['-l', '999', '-box', pdf], { encoding: 'utf8' });
-  const boxes = [...text.matchAll(/Page +\d+ (MediaBox|CropBox): +([\d.]+) +([\d.]+) +([\d.]+) +([\d.]+)/g)];
-  return { text, sizesPt: boxes.map((b) => [Number(b[4]) - Number(b[2]), Number(b[5]) - Number(b[3])]) };
-}
-
 /** The first and the last of the frames only: pages take a while to read. */
 const fewer = (input: TemplateInput): TemplateInput => ({ ...input, frames: [input.frames[0]!, input.frames.at(-1)!] });
 
-/** `17 7/8"` or `452 mm`, in mm, by its own reading. */
-function read(words: string): number {
-  const metric = /^([\d.]+) mm$/.exec(words);
-  if (metric) return Number(metric[1]);
-  const inches = /^(?:(\d+) ?)??(?:(\d+)\/(\d+))?"$/.exec(words)!;
-  return 25.4 * (Number(inches[1] ?? 0) + (inches[2] ? Number(inches[2]) / Number(inches[3]) : 0));
-}
-
-const length = '([\\d./ ]+(?: mm|"))';
-
-interface Checked {
-  page: number;
-  bars: { axis: 'across' | 'up'; statedMm: number; printedMm: number }[];
-  screws: { x: number; y: number }[];
-}
-
-/** Reads every sheet as the hanger does: where its cut edges say they are, how long its bars are, and where its cross-hairs stand. */
-async function readSheets(pdf: string, correction = { x: 1, y: 1 }): Promise<Checked[]> {
-  const pages = Number(/Pages: +(\d+)/.exec(info(pdf).text)![1]);
-  const sheets: Checked[] = [];
-  for (let page = 1; page <= pages; page += 1) {
-    const printed = await PrintedPage.read(pdf, page);
-    const bars = (['across', 'up'] as const).map((axis) => {
-      const stated = new RegExp(`This bar is ${length} ${axis}`).exec(printed.words);
-      return { axis, statedMm: read(stated![1]!), printedMm: printed.barLength(axis) };
-    });
-    const fromLeft = new RegExp(`this edge is ${length} from the wall’s left edge`).exec(printed.words);
-    const aboveFloor = new RegExp(`this edge is ${length} above the floor`).exec(printed.words);
-    const screws = [];
-    if (fromLeft && aboveFloor) {
-      const edges = printed.cutEdges();
-      for (const dot of printed.crossHairs()) {
-        screws.push({
-          x: read(fromLeft[1]!) + (dot.x - edges.x) / dotsPerMm / correction.x,
-          y: read(aboveFloor[1]!) + (edges.y - dot.y) / dotsPerMm / correction.y,
-        });
-      }
-    }
-    sheets.push({ page, bars, screws });
-  }
-  return sheets;
-}
-
-function expectTrue(sheets: Checked[], input: TemplateInput, correction = { x: 1, y: 1 }): void {
+function expectTrue(sheets: PrintedSheet[], input: TemplateInput, correction = { x: 1, y: 1 }): void {
   for (const { page, bars } of sheets) {
     for (const bar of bars) {
       const wanted = bar.statedMm * correction[bar.axis === 'across' ? 'x' : 'y'];
@@ -100,7 +52,7 @@ describe('a printed template', { timeout: 120_000 }, () => {
     ['a4', [210, 297]],
   ] as const)('has pages of exactly %s paper, upright or lying, and asks not to be scaled', async (paper, size) => {
     const pdf = await print(aTemplate({ paper }));
-    const { sizesPt, text } = info(pdf);
+    const { sizesPt, text } = pdfFacts(pdf);
     expect(sizesPt.length).toBeGreaterThan(4);
     for (const pt of sizesPt) {
       const mm = pt.map((n) => (n / 72) * 25.4).sort((a, b) => a - b);
