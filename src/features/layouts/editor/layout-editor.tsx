@@ -37,14 +37,14 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
         <ConflictNotice />
         <div className={classNames('flex min-h-80 flex-col border border-ink-700 lg:h-auto lg:min-h-[26rem] lg:grow', narrow ? 'h-[52dvh]' : 'h-[72dvh]')}>
           <StageToolbar wall={wall} readOnly={readOnly} />
-          <LayoutStage wall={wall} designs={designs} readOnly={readOnly} />
+          <LayoutStage wall={wall} designs={designs} findings={findings} readOnly={readOnly} />
           <StatusLine readOnly={readOnly} />
           {readOnly ? null : <Tray designs={designs} wall={wall} />}
         </div>
       </div>
       <aside aria-label="Ledger" className="flex shrink-0 flex-col gap-4 lg:w-96 lg:overflow-y-auto lg:pr-1">
         {readOnly ? null : <FrameSheet designs={designs} wall={wall} />}
-        <FindingsLedger findings={findings} />
+        <FindingsLedger findings={findings} designs={designs} />
         <FramesTable designs={designs} />
         <WholeSizes designs={designs} wall={wall} readOnly={readOnly} />
       </aside>

@@ -1,9 +1,11 @@
-import { type ReactNode, useState } from 'react';
+import { type ReactNode, useMemo, useState } from 'react';
 import type { Frame } from '../../../../../shared/layouts/layout.ts';
 import { byLabel } from '../../../../../shared/layouts/naming.ts';
 import type { Figure } from '../../../../../shared/units/figure.ts';
 import { FigureText } from '../../../../components/figure-text.tsx';
 import { WeightMark } from '../../../../components/weight-mark.tsx';
+import { showFrames } from '../stage/show-frames.ts';
+import type { Designs } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
 
 /** A finding as the ledger shows it. */
@@ -39,13 +41,25 @@ export function groupedFindings(findings: readonly ShownFinding[]): Group[] {
   return [...groups.values()].sort((a, b) => weights.indexOf(a.weight) - weights.indexOf(b.weight));
 }
 
-/** What the checks found; each can be opened to its words and figures, and chooses its frames. Null while the checks cannot run. */
-export function FindingsLedger({ findings }: { findings: readonly ShownFinding[] | null }) {
+/** The heaviest weight that each frame bears; frames without a finding are left out. */
+export function weightOfFrames(findings: readonly ShownFinding[]): ReadonlyMap<string, ShownFinding['weight']> {
+  const heaviest = new Map<string, ShownFinding['weight']>();
+  for (const { weight, frameIds } of findings) {
+    for (const id of frameIds) {
+      const known = heaviest.get(id);
+      if (known === undefined || weights.indexOf(weight) < weights.indexOf(known)) heaviest.set(id, weight);
+    }
+  }
+  return heaviest;
+}
+
+/** What the checks found, by weight; each finding can be opened to its words and figures, and shows its frames on the wall. Null while the checks cannot run. */
+export function FindingsLedger({ findings, designs }: { findings: readonly ShownFinding[] | null; designs: Designs }) {
   const frameCount = useEditor((e) => e.bench.frames.length);
-  const groups = groupedFindings(findings ?? []);
+  const groups = useMemo(() => groupedFindings(findings ?? []), [findings]);
   const counts = weights.flatMap((weight) => {
     const n = (findings ?? []).filter((f) => f.weight === weight).length;
-    return n > 0 ? [`${n} ${weight}`] : [];
+    return n > 0 ? [{ weight, n }] : [];
   });
   const none = findings === null ? 'The checks cannot run just now.' : frameCount === 0 ? 'Nothing to check yet.' : 'Nothing found.';
   return (
@@ -53,14 +67,24 @@ export function FindingsLedger({ findings }: { findings: readonly ShownFinding[]
       <div className="flex items-baseline justify-between border-b border-plaster-200 pb-1">
         <h2 className="text-base font-bold text-ink-900">Findings</h2>
         <p role="status" className="text-sm text-ink-700 tabular-nums">
-          {counts.join(', ') || none}
+          {counts.map(({ weight, n }) => `${n} ${weight}`).join(', ') || none}
         </p>
       </div>
-      <div className="mt-2 grid gap-1">
-        {groups.map((group) => (
-          <RuleGroup key={`${group.weight} ${group.title}`} group={group} />
-        ))}
-      </div>
+      {counts.map(({ weight, n }) => (
+        <section key={weight} aria-label={`${weight}: ${n}`} className="mt-2">
+          <h3 className="flex items-center gap-2 text-sm">
+            <WeightMark weight={weight} />
+            <span className="text-ink-700 tabular-nums">× {n}</span>
+          </h3>
+          <div className="mt-1 grid gap-1">
+            {groups
+              .filter((group) => group.weight === weight)
+              .map((group) => (
+                <RuleGroup key={group.title} group={group} designs={designs} />
+              ))}
+          </div>
+        </section>
+      ))}
     </section>
   );
 }
@@ -68,7 +92,7 @@ export function FindingsLedger({ findings }: { findings: readonly ShownFinding[]
 /** Most findings of one rule that are written out before asking. */
 const mostShown = 20;
 
-function RuleGroup({ group: { weight, title, source, list } }: { group: Group }) {
+function RuleGroup({ group: { weight, title, source, list }, designs }: { group: Group; designs: Designs }) {
   const store = useEditorStore();
   const frames = useEditor((e) => e.bench.frames);
   // Stops stand open: nobody should have to look for what must not be hung.
@@ -76,10 +100,13 @@ function RuleGroup({ group: { weight, title, source, list } }: { group: Group })
   const [all, setAll] = useState(false);
   const labels = new Map(frames.map((f) => [f.id, f]));
   const frameIds = [...new Set(list.flatMap((f) => f.frameIds))];
+  const named = (ids: readonly string[]) => {
+    const known = ids.flatMap((id) => labels.get(id)?.label ?? []);
+    return ids.length === 1 ? `frame ${known[0] ?? ''}` : known.length <= 3 ? `frames ${known.join(', ')}` : `${ids.length} frames`;
+  };
   return (
     <details open={open} onToggle={(event) => setOpen(event.currentTarget.open)} className="rounded-sm border border-plaster-200 bg-white">
       <summary className="flex cursor-pointer items-start gap-2 px-2 py-1.5 hover:text-chalk-700">
-        <WeightMark weight={weight} />
         <span className="grow text-sm font-semibold">{title}</span>
         {list.length > 1 ? <span className="shrink-0 text-sm whitespace-nowrap text-ink-700 tabular-nums">× {list.length}</span> : null}
       </summary>
@@ -90,7 +117,10 @@ function RuleGroup({ group: { weight, title, source, list } }: { group: Group })
               .slice(0, all ? undefined : mostShown)
               .map((finding) => (
                 <li key={finding.id}>
-                  <p>{finding.words}</p>
+                  <p>
+                    {finding.words}{' '}
+                    {finding.frameIds.length > 0 ? <Deed onPress={() => showFrames(store, designs, finding.frameIds)}>Show {named(finding.frameIds)}</Deed> : null}
+                  </p>
                   {finding.figures.map((figure) => (
                     <FigureText key={figure.label} figure={figure} />
                   ))}
@@ -100,11 +130,7 @@ function RuleGroup({ group: { weight, title, source, list } }: { group: Group })
           <p className="flex flex-wrap items-baseline justify-between gap-x-3 border-t border-plaster-200 px-2 py-1.5 text-xs text-ink-700">
             <span>Source: {source}</span>
             {list.length > mostShown && !all ? <Deed onPress={() => setAll(true)}>All {list.length}</Deed> : null}
-            {frameIds.length > 0 ? (
-              <Deed onPress={() => store.dispatch({ kind: 'select', ids: frameIds })}>
-                Show {frameIds.length === 1 ? `frame ${labels.get(frameIds[0]!)?.label ?? ''}` : `${frameIds.length} frames`}
-              </Deed>
-            ) : null}
+            {list.length > 1 && frameIds.length > 0 ? <Deed onPress={() => showFrames(store, designs, frameIds)}>Show all {frameIds.length} frames</Deed> : null}
           </p>
         </>
       ) : null}

@@ -6,6 +6,7 @@ import { formatLength } from '../../../../../shared/units/length.ts';
 import { Table, Td, Th } from '../../../../components/table.tsx';
 import { TextField } from '../../../../components/text-field.tsx';
 import { useUnits } from '../../../../lib/units.ts';
+import { pictureHeightsMm } from '../../../../../shared/layouts/picture-heights.ts';
 import { boxRound, changeSheet } from '../operations/operations.ts';
 import { type Designs, wallOutline } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
@@ -76,6 +77,8 @@ export function WholeSizes({ designs, wall, readOnly }: { designs: Designs; wall
     ['From right edge', wall.widthMm - box.right],
     ['Above floor', box.bottom],
     ['Below top', wall.heightMm - box.top],
+    ['Middle from left', (box.left + box.right) / 2],
+    ['Middle above floor', (box.bottom + box.top) / 2],
   ];
   return (
     <section aria-label="The whole">
@@ -88,6 +91,7 @@ export function WholeSizes({ designs, wall, readOnly }: { designs: Designs; wall
           </div>
         ))}
       </dl>
+      {box ? <p className="mt-1 text-xs text-ink-700">Common practice hangs the middle {formatLength(pictureHeightsMm[0], units)} to {formatLength(pictureHeightsMm[1], units)} above the floor where people stand to look.</p> : null}
       {readOnly ? null : <LayoutName />}
     </section>
   );

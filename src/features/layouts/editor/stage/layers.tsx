@@ -2,7 +2,7 @@ import type Konva from 'konva';
 import { useCallback, useMemo } from 'react';
 import { Layer, Shape } from 'react-konva';
 import { placedAll, type Placement } from '../../../../../shared/geometry/polygon.ts';
-import { shadowDrawing, wallDrawing } from '../../../../../shared/layouts/drawing.ts';
+import { hangerDrawing, shadowDrawing, wallDrawing, type Primitive } from '../../../../../shared/layouts/drawing.ts';
 import type { Frame } from '../../../../../shared/layouts/layout.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
 import { colours } from '../../../../../tailwind.config.ts';
@@ -12,7 +12,7 @@ import { draw, drawPicture, write } from './canvas-pen.ts';
 import { layerPlace } from './view.ts';
 
 /** Every layer draws in wall mm, y up, by one shape; hits are found on the bench, never on the canvas. */
-function WallLayer({ paint }: { paint: (context: CanvasRenderingContext2D, pxPerMm: number) => void }) {
+export function WallLayer({ paint }: { paint: (context: CanvasRenderingContext2D, pxPerMm: number) => void }) {
   const view = useEditor((e) => e.view);
   const scene = useCallback((context: Konva.Context, shape: Konva.Shape) => paint(context._context, shape.getAbsoluteScale().x), [paint]);
   return (
@@ -58,13 +58,22 @@ const shadows = new WeakMap<Placement, ReturnType<typeof shadowDrawing>>();
 const labelPx = 14;
 const leastLabelledPx = 15;
 
-function paintFrame(context: CanvasRenderingContext2D, pattern: ReadyPattern, at: Placement, pxPerMm: number, hangers: boolean): void {
+type Slides = NonNullable<Frame['hangerSlides']>;
+const slid = new WeakMap<Slides, { pattern: ReadyPattern; flipped: boolean; drawing: Primitive[] }>();
+
+function slidHangers(pattern: ReadyPattern, flipped: boolean, slides: Slides): Primitive[] {
+  let known = slid.get(slides);
+  if (!known || known.pattern !== pattern || known.flipped !== flipped) slid.set(slides, (known = { pattern, flipped, drawing: hangerDrawing(pattern.design, flipped, slides) }));
+  return known.drawing;
+}
+
+function paintFrame(context: CanvasRenderingContext2D, pattern: ReadyPattern, at: Placement, pxPerMm: number, hangers: boolean, slides: Slides | undefined): void {
   context.save();
   context.translate(at.xMm, at.yMm);
   context.rotate(at.turnRad);
   const drawing = pattern.drawing(at.flipped);
   draw(context, drawing.body, pxPerMm);
-  if (hangers) draw(context, drawing.hangers, pxPerMm);
+  if (hangers) draw(context, slides ? slidHangers(pattern, at.flipped, slides) : drawing.hangers, pxPerMm);
   context.restore();
 }
 
@@ -86,7 +95,7 @@ export function FramesLayer({ designs }: { designs: Designs }) {
       const held = heldKey ? new Set(heldKey.split(' ')) : none;
       const still = frames.filter((f) => !held.has(f.id) && designs.has(f.patternId));
       for (const frame of still) paintShadow(context, designs.get(frame.patternId)!, frame, pxPerMm);
-      for (const frame of still) paintFrame(context, designs.get(frame.patternId)!, frame, pxPerMm, hangers);
+      for (const frame of still) paintFrame(context, designs.get(frame.patternId)!, frame, pxPerMm, hangers, frame.hangerSlides);
       for (const frame of still) {
         // Too small to read is left out: the ledger has them all.
         if (designs.get(frame.patternId)!.radiusMm * pxPerMm > leastLabelledPx) paintLabel(context, frame, pxPerMm);
@@ -109,12 +118,15 @@ export function HandLayer({ designs }: { designs: Designs }) {
   const paint = useCallback(
     (context: CanvasRenderingContext2D, pxPerMm: number) => {
       if (!hand) return;
-      const held: [ReadyPattern | undefined, Placement][] = [...hand.placements].map(([id, at]) => [designs.get(frames.find((f) => f.id === id)?.patternId ?? ''), at]);
-      if (hand.fromTray?.at) held.push([designs.get(hand.fromTray.patternId), hand.fromTray.at]);
-      for (const [pattern, at] of held) {
+      const held: [ReadyPattern | undefined, Placement, Slides | undefined][] = [...hand.placements].map(([id, at]) => {
+        const frame = frames.find((f) => f.id === id);
+        return [designs.get(frame?.patternId ?? ''), at, frame?.hangerSlides];
+      });
+      if (hand.fromTray?.at) held.push([designs.get(hand.fromTray.patternId), hand.fromTray.at, undefined]);
+      for (const [pattern, at, slides] of held) {
         if (!pattern) continue;
         paintShadow(context, pattern, at, pxPerMm);
-        paintFrame(context, pattern, at, pxPerMm, hangers);
+        paintFrame(context, pattern, at, pxPerMm, hangers, slides);
       }
     },
     [hand, frames, designs, hangers],

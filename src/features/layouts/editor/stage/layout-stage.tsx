@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import { Stage } from 'react-konva';
 import { formatLength } from '../../../../../shared/units/length.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
@@ -7,20 +7,24 @@ import { usePicture } from '../../../../lib/picture.ts';
 import { useUnits } from '../../../../lib/units.ts';
 import { listenToKeys } from '../gestures/keys.ts';
 import { listenToPointer } from '../gestures/pointer.ts';
+import { type ShownFinding, weightOfFrames } from '../ledger/findings-ledger.tsx';
 import type { Designs } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
 import { GuidesLayer } from './guides-layer.tsx';
 import { FramesLayer, GroundLayer, HandLayer, SiteLayer } from './layers.tsx';
+import { MarksLayer } from './marks-layer.tsx';
 import { fitted } from './view.ts';
 
 interface Props {
   wall: Wall;
   designs: Designs;
+  /** Frames with a stop or a caution are marked; null while the checks cannot run. */
+  findings: readonly ShownFinding[] | null;
   readOnly: boolean;
 }
 
 /** The wall with its frames, drawn to scale; what can be done on it by hand can be done from the ledger too. */
-export function LayoutStage({ wall, designs, readOnly }: Props) {
+export function LayoutStage({ wall, designs, findings, readOnly }: Props) {
   const store = useEditorStore();
   const units = useUnits();
   const element = useRef<HTMLDivElement>(null);
@@ -30,6 +34,7 @@ export function LayoutStage({ wall, designs, readOnly }: Props) {
   const carrying = useEditor((e) => e.hand !== null);
   const [over, setOver] = useState(false);
   const picture = wall.photo?.elevation ?? null;
+  const marked = useMemo(() => weightOfFrames(findings ?? []), [findings]);
   const image = useImage(picture?.url ?? null);
 
   useEffect(() => {
@@ -84,6 +89,7 @@ export function LayoutStage({ wall, designs, readOnly }: Props) {
           <GroundLayer wall={wall} picture={picture} image={image} />
           <SiteLayer wall={wall} />
           <FramesLayer designs={designs} />
+          <MarksLayer designs={designs} marked={marked} />
           <HandLayer designs={designs} />
           <GuidesLayer designs={designs} readOnly={readOnly} lengthText={(mm) => formatLength(mm, units)} />
         </Stage>

@@ -1,4 +1,4 @@
-import type { Point } from '../../../../../shared/geometry/polygon.ts';
+import type { Box, Point } from '../../../../../shared/geometry/polygon.ts';
 
 /**
  * How the wall is seen: screen px = (left + scale · x, bottom − scale · y). The one place where y is turned over:
@@ -41,6 +41,21 @@ export function zoomed(view: View, factor: number, at: Point): View {
 }
 
 export const panned = (view: View, dx: number, dy: number): View => ({ ...view, left: view.left + dx, bottom: view.bottom + dy });
+
+/** A part of the wall in the middle of the stage, with a margin; never nearer than `nearest` (CSS px for a millimetre). */
+export function fittedTo({ left, bottom, right, top }: Box, size: Size, nearest = 1): View {
+  const room = { width: Math.max(1, size.width - 4 * marginPx), height: Math.max(1, size.height - 4 * marginPx) };
+  const scale = clamped(Math.min(nearest, room.width / Math.max(1, right - left), room.height / Math.max(1, top - bottom)));
+  return { scale, left: size.width / 2 - ((left + right) / 2) * scale, bottom: size.height / 2 + ((bottom + top) / 2) * scale };
+}
+
+/** The same view moved and, only if need be, drawn farther, so that a part of the wall is wholly in sight. */
+export function showing(view: View, box: Box, size: Size): View {
+  const a = toScreen(view, { x: box.left, y: box.top });
+  const b = toScreen(view, { x: box.right, y: box.bottom });
+  const inside = a.x >= 0 && a.y >= 0 && b.x <= size.width && b.y <= size.height;
+  return inside ? view : fittedTo(box, size, view.scale);
+}
 
 function clamped(scale: number): number {
   return Number.isFinite(scale) ? Math.min(mostScale, Math.max(leastScale, scale)) : leastScale;
