@@ -54,7 +54,7 @@ export function layoutsRepository(data: DataSource) {
           }
         }
         if (gone.size > 0) await m.delete(FrameRow, { layoutId: id, id: In([...gone]) });
-        if (kept.size > 0) await m.upsert(FrameRow, [...kept.values()].map((f) => ({ ...f, layoutId: id })), ['layoutId', 'id']);
+        if (kept.size > 0) await m.upsert(FrameRow, [...kept.values()].map((f) => ({ ...f, hangerSlides: f.hangerSlides ?? null, layoutId: id })), ['layoutId', 'id']);
         return true;
       });
     },
@@ -67,5 +67,5 @@ export type LayoutsRepository = ReturnType<typeof layoutsRepository>;
 
 const frameOf = (row: FrameRow): Frame => ({
   id: row.id, patternId: row.patternId, xMm: row.xMm, yMm: row.yMm, turnRad: row.turnRad, flipped: Boolean(row.flipped), locked: Boolean(row.locked),
-  label: row.label, contentsKg: row.contentsKg, hungGroup: row.hungGroup,
+  label: row.label, contentsKg: row.contentsKg, hungGroup: row.hungGroup, ...(row.hangerSlides ? { hangerSlides: row.hangerSlides } : {}),
 });

@@ -4,7 +4,7 @@ import { placeFrame } from '../../shared/findings/placed-frame.ts';
 import { usualLimits } from '../../shared/findings/scene.ts';
 import type { HardwareBook } from '../../shared/hardware/hardware-book.ts';
 import { leadHole } from '../../shared/hardware/lead-hole.ts';
-import { studSpecies, usualStudSpecies } from '../../shared/hardware/stud-species.ts';
+import { studSpecies, type StudSpecies } from '../../shared/hardware/stud-species.ts';
 import type { PatternDesign } from '../../shared/patterns/pattern.ts';
 import type { TemplateInput } from '../../shared/templates/template-input.ts';
 import type { templatesApi } from '../../shared/templates/templates.api.ts';
@@ -69,17 +69,17 @@ function templateFrames({ frames, patterns, wall }: Content, book: HardwareBook)
       label: frame.label,
       outlineMm: placed.outline,
       hangers: hangers.map(({ hanger, x, y, meeting }, i) => ({
-        id: hanger.id, label: `${frame.label}${String.fromCharCode(97 + (i % 26))}`, x, y, ...fastener(hanger, meeting?.inStud === true || wall.construction === 'solid wood', book),
+        id: hanger.id, label: `${frame.label}${String.fromCharCode(97 + (i % 26))}`, x, y, ...fastener(hanger, meeting?.inStud === true || wall.construction === 'solid wood' ? wall.studSpecies : null, book),
       })),
     }];
   });
 }
 
-/** What is drilled and driven for one hanger: its screw in wood, else its anchor, whose hole its packet states. */
-function fastener(hanger: PatternDesign['hangers'][number], inWood: boolean, book: HardwareBook): { drillMm: number | null; hardware: string } {
+/** What is drilled and driven for one hanger: its screw in wood of a species, else its anchor, whose hole its packet states. */
+function fastener(hanger: PatternDesign['hangers'][number], wood: StudSpecies | null, book: HardwareBook): { drillMm: number | null; hardware: string } {
   const bracket = book.brackets.find((b) => b.id === hanger.bracketId)?.name ?? 'bracket not chosen';
   const screw = book.screws.find((s) => s.id === hanger.wallScrewId);
   const anchor = book.anchors.find((a) => a.id === hanger.anchorId);
-  if (inWood) return { drillMm: screw ? leadHole(screw, studSpecies[usualStudSpecies]) : null, hardware: `${bracket}; ${screw?.name ?? 'screw not chosen'}` };
+  if (wood) return { drillMm: screw ? leadHole(screw, studSpecies[wood]) : null, hardware: `${bracket}; ${screw?.name ?? 'screw not chosen'}` };
   return { drillMm: null, hardware: `${bracket}; ${anchor ? `${anchor.name}, hole as its packet says` : 'anchor not chosen'}` };
 }

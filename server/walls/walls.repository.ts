@@ -5,7 +5,7 @@ import { duplicateKey, errorNumber, inTransaction } from '../database/transactio
 /** A wall with its studs from left to right and the photo in force. */
 export type WallWhole = WallRow & { studs: StudRow[]; photo: PhotoRow | null };
 
-export type WallValues = Partial<Pick<WallRow, 'name' | 'widthMm' | 'heightMm' | 'construction' | 'coveringMm' | 'obstructions' | 'zones'>>;
+export type WallValues = Partial<Pick<WallRow, 'name' | 'widthMm' | 'heightMm' | 'construction' | 'coveringMm' | 'studSpecies' | 'obstructions' | 'zones'>>;
 
 export function wallsRepository(data: DataSource) {
   const walls = data.getRepository(WallRow);

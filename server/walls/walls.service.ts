@@ -169,7 +169,7 @@ function requireStudsOnWall(studs: readonly Stud[], widthMm: number): void {
 function told(wall: WallWhole): Wall {
   return {
     id: wall.id, jobId: wall.jobId, name: wall.name, widthMm: wall.widthMm, heightMm: wall.heightMm, construction: wall.construction,
-    coveringMm: wall.coveringMm, version: wall.version, obstructions: wall.obstructions, zones: wall.zones,
+    coveringMm: wall.coveringMm, studSpecies: wall.studSpecies, version: wall.version, obstructions: wall.obstructions, zones: wall.zones,
     studs: wall.studs.map(({ id, xMm, widthMm, foundBy, uncertaintyMm }) => ({ id, xMm, widthMm, foundBy, uncertaintyMm })),
     photo: wall.photo && toldPhoto(wall.photo),
   };

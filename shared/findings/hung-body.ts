@@ -7,7 +7,7 @@ import { connectionGravity } from '../hardware/timber.ts';
 import { placedMembers } from '../patterns/hangers.ts';
 import type { Hanger } from '../patterns/pattern.ts';
 import { hangerKey, type PlacedFrame } from './placed-frame.ts';
-import { speciesOf, type Surroundings } from './scene.ts';
+import type { Surroundings } from './scene.ts';
 
 /** One hanger of a body with its load, what holds it, and how it meets the studs. */
 export interface HungHanger {
@@ -74,7 +74,7 @@ function wallFixing(hanger: Hanger, meeting: StudMeeting | null, around: Surroun
   const { wall, book } = around;
   const screw = book.screws.find((s) => s.id === hanger.wallScrewId);
   const inWood = wall.construction === 'solid wood' || (hasWoodStuds(around) && meeting?.inStud);
-  if (inWood && screw) return { kind: 'wood', screw, gravity: studSpecies[speciesOf(wall)], coveringMm: wall.coveringMm, woodMm: null };
+  if (inWood && screw) return { kind: 'wood', screw, gravity: studSpecies[wall.studSpecies], coveringMm: wall.coveringMm, woodMm: null };
   const anchor = inWood ? undefined : book.anchors.find((a) => a.id === hanger.anchorId);
   // An anchor's packet rates it for one kind of wall; in the other it counts for nothing.
   if (anchor && (anchor.kind === 'masonry') === (wall.construction === 'masonry')) return { kind: 'anchor', anchor };

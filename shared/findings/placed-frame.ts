@@ -4,7 +4,7 @@ import { boxOf, type Box } from '../geometry/polygon.ts';
 import type { Frame, LayoutPattern } from '../layouts/layout.ts';
 import { contentsOf, type Contents } from '../patterns/contents.ts';
 import { placedHangers, placedOutline, type PlacedHanger } from '../patterns/hangers.ts';
-import { frameMass, type FrameMass } from '../patterns/mass.ts';
+import { frameMass, hardwareKgEach, type FrameMass } from '../patterns/mass.ts';
 import type { PatternDesign } from '../patterns/pattern.ts';
 
 /** A frame on the wall with what follows from its place and its pattern. */
@@ -33,15 +33,26 @@ export function placeFrame(frame: Frame, pattern: LayoutPattern): PlacedFrame {
   const { design } = pattern;
   const outline = placedOutline(frame, design);
   const mass = massOf(design);
+  const hangers = placedHangers(frame, design);
+  const centre = placed(mass.centre, frame);
+  if (frame.hangerSlides) {
+    // Brackets that were slid take their own mass along.
+    const drawn = placedHangers({ ...frame, hangerSlides: undefined }, design);
+    const share = mass.kg > 0 ? hardwareKgEach / mass.kg : 0;
+    hangers.forEach((h, i) => {
+      centre.x += share * (h.x - drawn[i]!.x);
+      centre.y += share * (h.y - drawn[i]!.y);
+    });
+  }
   return {
     frame,
     pattern,
     outline,
     box: boxOf(outline),
-    hangers: placedHangers(frame, design),
+    hangers,
     mass,
     contents: contentsOf(design, frame),
-    centre: { ...placed(mass.centre, frame), z: mass.centre.z },
+    centre: { ...centre, z: mass.centre.z },
   };
 }
 

@@ -1,5 +1,4 @@
 import type { HardwareBook } from '../hardware/hardware-book.ts';
-import { usualStudSpecies, type StudSpecies } from '../hardware/stud-species.ts';
 import type { Frame, LayoutPattern, LayoutSheet } from '../layouts/layout.ts';
 import type { LengthUnits } from '../units/constants.ts';
 import type { Obstruction, Stud, WallShape, Zone } from '../walls/wall.ts';
@@ -16,7 +15,7 @@ export interface ShopLimits {
 /** 45° is where most saws end; 1/8 in beside a hole keeps a lip whole (both common practice). */
 export const usualLimits: ShopLimits = { units: 'in', sawTiltRad: Math.PI / 4, holeEdgeMm: 3.175 };
 
-export type SceneWall = WallShape & { studSpecies?: StudSpecies; studs: readonly Stud[]; obstructions: readonly Obstruction[]; zones: readonly Zone[] };
+export type SceneWall = WallShape & { studs: readonly Stud[]; obstructions: readonly Obstruction[]; zones: readonly Zone[] };
 
 /** Everything that findings depend on. Parts that stay the same object count as unchanged. */
 export interface Scene {
@@ -28,8 +27,6 @@ export interface Scene {
   limits: ShopLimits;
   changedSinceSigned: boolean;
 }
-
-export const speciesOf = (wall: SceneWall): StudSpecies => wall.studSpecies ?? usualStudSpecies;
 
 /** What stays the same while frames are moved; rules on frames see this and no other frame. */
 export interface Surroundings {

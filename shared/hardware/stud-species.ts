@@ -1,3 +1,5 @@
+import { z } from 'zod';
+
 /**
  * Specific gravity that NDS-2018 table 12.3.3A assigns to species groups of framing lumber (oven-dry weight over oven-dry volume).
  * Groups met in stud walls; hardwoods follow below.
@@ -20,6 +22,7 @@ export const studSpecies = {
   aspen: 0.39,
 } as const;
 export type StudSpecies = keyof typeof studSpecies;
+export const StudSpecies = z.enum(Object.keys(studSpecies) as [StudSpecies, ...StudSpecies[]], { error: 'This species group is not in the table.' });
 
 /** Group taken unless the shop says otherwise; 0.36 (western woods, spruce-pine-fir south) is the more cautious choice. */
 export const usualStudSpecies: StudSpecies = 'spruce-pine-fir';

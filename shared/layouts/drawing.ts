@@ -1,7 +1,7 @@
 import { placed, type Placement, type Point } from '../geometry/point.ts';
 import { boxOf, boxRing, placedAll, type Polygon } from '../geometry/polygon.ts';
 import { frameGeometry } from '../patterns/frame.ts';
-import { placedHangers } from '../patterns/hangers.ts';
+import { placedHangers, type HangerPlacement } from '../patterns/hangers.ts';
 import type { PatternDesign, Species } from '../patterns/pattern.ts';
 import { isConfirmed, type Obstruction, type Stud } from '../walls/wall.ts';
 import type { Frame, LayoutPattern } from './layout.ts';
@@ -30,8 +30,8 @@ export interface DrawnWall { widthMm: number; heightMm: number; studs: readonly 
 const hatchPitchMm = 45;
 const hangerRadiusMm = 7;
 
-/** A frame as the real thing, seen from the front, about its own centroid: not turned, but flipped if asked. Hangers apart, for they may be hidden. */
-export function frameDrawing(design: PatternDesign, isFlipped = false): { body: Primitive[]; hangers: Primitive[] } {
+/** A frame as the real thing, seen from the front, about its own centroid: not turned, but flipped if asked. Hangers apart, for they may be hidden or slid. */
+export function frameDrawing(design: PatternDesign, isFlipped = false, hangerSlides?: HangerPlacement['hangerSlides']): { body: Primitive[]; hangers: Primitive[] } {
   const at: Placement = { xMm: 0, yMm: 0, turnRad: 0, flipped: isFlipped };
   const geometry = frameGeometry(design);
   const outline = placedAll(geometry.outline, at);
@@ -50,11 +50,15 @@ export function frameDrawing(design: PatternDesign, isFlipped = false): { body: 
   }
   body.push({ kind: 'line', ink: 'rim', points: outline, closed: true, dashed: false });
   for (const hole of holes) body.push({ kind: 'line', ink: 'rim', points: hole, closed: true, dashed: false });
-  const hangers = placedHangers(at, design).flatMap(({ x, y }): Primitive[] => [
+  return { body, hangers: hangerDrawing(design, isFlipped, hangerSlides) };
+}
+
+/** The hangers of a frame, in the same plane as `frameDrawing`. */
+export function hangerDrawing(design: PatternDesign, flipped: boolean, hangerSlides?: HangerPlacement['hangerSlides']): Primitive[] {
+  return placedHangers({ xMm: 0, yMm: 0, turnRad: 0, flipped, hangerSlides }, design).flatMap(({ x, y }): Primitive[] => [
     { kind: 'dot', ink: 'hanger rim', at: { x, y }, radiusMm: hangerRadiusMm },
     { kind: 'dot', ink: 'hanger', at: { x, y }, radiusMm: hangerRadiusMm * 0.72 },
   ]);
-  return { body, hangers };
 }
 
 const between = (a: Point, b: Point, share: number): Point => ({ x: a.x + (b.x - a.x) * share, y: a.y + (b.y - a.y) * share });
@@ -136,7 +140,7 @@ export function layoutDrawing(input: {
   for (const frame of input.frames) {
     const design = designs.get(frame.patternId);
     if (!design) continue;
-    const drawn = frameDrawing(design, frame.flipped);
+    const drawn = frameDrawing(design, frame.flipped, frame.hangerSlides);
     const { outline, opening } = frameGeometry(design);
     shadows.push(...shadowDrawing(design, placedAll(outline, frame), placedAll(opening, frame)));
     bodies.push(...drawn.body.map((p) => brought(p, frame)));

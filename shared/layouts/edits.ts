@@ -32,8 +32,14 @@ export function sameFrame(a: Frame | null, b: Frame | null): boolean {
     a.locked === b.locked &&
     a.label === b.label &&
     a.contentsKg === b.contentsKg &&
-    a.hungGroup === b.hungGroup
+    a.hungGroup === b.hungGroup &&
+    sameSlides(a.hangerSlides ?? {}, b.hangerSlides ?? {})
   );
+}
+
+/** A hanger that is not named has not been slid. */
+function sameSlides(a: Readonly<Record<string, number>>, b: Readonly<Record<string, number>>): boolean {
+  return a === b || [...Object.keys(a), ...Object.keys(b)].every((hanger) => (a[hanger] ?? 0) === (b[hanger] ?? 0));
 }
 
 /** Whether two sheets say the same. */

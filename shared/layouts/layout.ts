@@ -20,6 +20,8 @@ export const Frame = z.object({
   contentsKg: z.number().finite().min(0).max(500).nullable(),
   /** Frames that bear the same name are screwed to one another and hang as one body. */
   hungGroup: z.string().max(40).nullable(),
+  /** How far hangers stand from where their pattern puts them, mm along their member, by the hanger's id; left out where all stand there. */
+  hangerSlides: z.record(z.string().min(1).max(40), z.number().finite().min(-3000).max(3000)).optional(),
 });
 export type Frame = z.infer<typeof Frame>;
 

@@ -10,6 +10,8 @@ export interface PlacedHanger {
   id: string;
   x: number;
   y: number;
+  /** How far it has been slid from where the pattern puts it, mm along its member. */
+  slidMm: number;
   slide: Segment;
 }
 
@@ -47,14 +49,18 @@ export function placedMembers(frame: Placement, design: Pick<PatternDesign, 'sha
   return frame.flipped ? members.map((_, index) => ({ ...members[n - 1 - index]!, index })) : members;
 }
 
-/** The hangers of a frame on the wall, in the design's order. */
-export function placedHangers(frame: Placement, design: Pick<PatternDesign, 'shape' | 'thicknessMm' | 'hangers'>): PlacedHanger[] {
+/** A frame's place and what its own hangers were slid by, mm along their members; see `Frame`. */
+export type HangerPlacement = Placement & { hangerSlides?: Readonly<Record<string, number>> };
+
+/** The hangers of a frame on the wall, in the design's order. No hanger is slid beyond its allowance, even where that was made less since. */
+export function placedHangers(frame: HangerPlacement, design: Pick<PatternDesign, 'shape' | 'thicknessMm' | 'hangers'>): PlacedHanger[] {
   const members = membersOf(outlineOf(design.shape), design.thicknessMm);
   return design.hangers.map((hanger) => {
     const member = memberOf(members, hanger.member);
     const at = (offset: number): Point => placed(alongMember(member, hanger.alongMm + offset, hanger.insetMm), frame);
     const [low, high] = hanger.allowanceMm;
-    return { id: hanger.id, ...at(0), slide: { from: at(low), to: at(high) } };
+    const slidMm = Math.min(Math.max(frame.hangerSlides?.[hanger.id] ?? 0, low), high);
+    return { id: hanger.id, ...at(slidMm), slidMm, slide: { from: at(low), to: at(high) } };
   });
 }
 

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { id, instant } from '../api/endpoint.ts';
+import { StudSpecies, usualStudSpecies } from '../hardware/stud-species.ts';
 
 /** A length on a wall in mm: finite, above zero, below what any wall of this trade reaches. */
 export const wallLengthMm = z.number({ error: 'Please give a length.' }).finite().positive('This length must be more than zero.').max(30_000, 'A wall longer than 30 m must be taken in parts.');
@@ -51,6 +52,8 @@ export const WallShape = z.object({
   construction: Construction,
   /** What lies between bracket and stud, mm (1/2 in board = 12.7). */
   coveringMm: z.number().finite().min(0).max(100, 'A covering is at most 100 mm thick.'),
+  /** Species group of the framing (or of a solid wood wall): how hard its wood holds a screw. */
+  studSpecies: StudSpecies.default(usualStudSpecies),
 });
 export type WallShape = z.infer<typeof WallShape>;
 

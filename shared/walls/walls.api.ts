@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { bytes, endpoint, id } from '../api/endpoint.ts';
+import { StudSpecies } from '../hardware/stud-species.ts';
 import { Mark, Obstruction, Photo, Stud, Wall, WallShape, Zone } from './wall.ts';
 
 const inWall = z.object({ wallId: id });
@@ -14,6 +15,8 @@ export const wallsApi = {
     params: inWall,
     body: WallShape.partial().extend({
       version: z.number().int(),
+      // Without a default: what is not named stays as it is.
+      studSpecies: StudSpecies.optional(),
       studs: z.array(Stud).max(200).optional(),
       obstructions: z.array(Obstruction).max(200).optional(),
       zones: z.array(Zone).max(50).optional(),

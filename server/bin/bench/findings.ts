@@ -27,7 +27,7 @@ function scene(count: number): Scene {
   });
   return {
     wall: {
-      name: 'Bench', widthMm: 6000, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7, zones: [],
+      name: 'Bench', widthMm: 6000, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7, studSpecies: 'spruce-pine-fir', zones: [],
       studs: studsBySpacing(200, 406.4, 6000).map((xMm, i) => ({ id: id(100 + i), xMm, widthMm: 38.1, foundBy: 'finder', uncertaintyMm: 6 })),
       obstructions: [{ id: id(50), kind: 'outlet', name: '', clearanceMm: 50, outlineMm: [[3000, 300], [3080, 300], [3080, 380], [3000, 380]] }],
     },

@@ -59,6 +59,7 @@ export class FrameRow {
   @Text(12) label: string;
   @Mm({ nullable: true }) contentsKg: number | null;
   @Text(40, { nullable: true }) hungGroup: string | null;
+  @Json({ nullable: true }) hangerSlides: Record<string, number> | null;
 }
 
 /** A layout as it was sent: the canonical text never changes after the row is written. */

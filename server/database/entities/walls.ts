@@ -16,6 +16,7 @@ export class WallRow {
   @Mm() heightMm: number;
   @Text(20) construction: WallShape['construction'];
   @Mm() coveringMm: number;
+  @Text(30) studSpecies: WallShape['studSpecies'];
   @Json() obstructions: Obstruction[];
   @Json() zones: Zone[];
   /** The photo in force. No foreign key: photos point at walls, and a circle of keys cannot be filled. */

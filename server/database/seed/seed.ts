@@ -76,7 +76,7 @@ async function seed(data: Database, rooms: Rooms): Promise<void> {
 async function measuredJob(rooms: Rooms, who: Who, sceneName: string, sheet: { title: string; clientName: string; clientEmail: string; site: string }, unsure: number, zones: ReturnType<typeof zone>[]) {
   const scene = demoScene(sceneName);
   const job = await rooms.jobs.create(who, sheet);
-  const wall = await rooms.walls.create(who, job.id, { name: 'Long wall', widthMm: scene.widthMm, heightMm: scene.heightMm, construction: 'wood studs', coveringMm: 0.5 * inch });
+  const wall = await rooms.walls.create(who, job.id, { name: 'Long wall', widthMm: scene.widthMm, heightMm: scene.heightMm, construction: 'wood studs', coveringMm: 0.5 * inch, studSpecies: 'spruce-pine-fir' });
   await rooms.walls.change(who, wall.id, { version: wall.version, studs: scene.studs(unsure), obstructions: scene.obstructions, zones });
   // The upload takes the file it is given, so it gets a copy.
   const folder = mkdtempSync(path.join(os.tmpdir(), 'combwright-demo-'));

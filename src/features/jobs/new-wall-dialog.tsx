@@ -1,4 +1,5 @@
-import { Controller } from 'react-hook-form';
+import { Controller, useWatch } from 'react-hook-form';
+import { studSpecies, usualStudSpecies } from '../../../shared/hardware/stud-species.ts';
 import { constructions, type Wall, WallShape } from '../../../shared/walls/wall.ts';
 import { Button } from '../../components/button.tsx';
 import { FormDialog } from '../../components/form-dialog.tsx';
@@ -16,6 +17,10 @@ export const constructionWords: Record<(typeof constructions)[number], string> =
   masonry: 'Masonry',
   'solid wood': 'Solid wood',
 };
+
+const speciesOptions = Object.entries(studSpecies).map(([value, gravity]) => ({ value, words: `${value.charAt(0).toUpperCase()}${value.slice(1)} (${gravity.toFixed(2)})` }));
+/** Where screws hold in wood, its species counts. */
+const inWood: readonly WallShape['construction'][] = ['wood studs', 'plaster on lath', 'solid wood'];
 
 /** Usual board thicknesses (common practice), in the units they are sold in. */
 const coverings = {
@@ -39,11 +44,12 @@ export function NewWallDialog({ jobId, onClose, onAdded }: { jobId: string; onCl
   const add = useAddWall(jobId);
   const sheet = useSheetForm({
     schema: WallShape,
-    defaultValues: { name: '', construction: 'wood studs', coveringMm: units === 'in' ? 12.7 : 12.5 },
+    defaultValues: { name: '', construction: 'wood studs', studSpecies: usualStudSpecies, coveringMm: units === 'in' ? 12.7 : 12.5 },
     send: async (body) => onAdded(await add.mutateAsync(body)),
   });
   const { register, control, formState, setValue } = sheet.form;
   const { errors } = formState;
+  const construction = useWatch({ control, name: 'construction' });
   const length = (name: 'widthMm' | 'heightMm' | 'coveringMm', label: string, hint?: string) => (
     <Controller
       control={control}
@@ -59,6 +65,9 @@ export function NewWallDialog({ jobId, onClose, onAdded }: { jobId: string; onCl
         {length('heightMm', 'Height', 'Finished floor to ceiling.')}
       </div>
       <SelectField label="Construction" options={constructions.map((c) => ({ value: c, words: constructionWords[c] }))} error={errors.construction?.message} {...register('construction')} />
+      {inWood.includes(construction) ? (
+        <SelectField label="Wood of the studs" hint="Species group and its specific gravity by NDS-2018. In doubt take a lower one." options={speciesOptions} error={errors.studSpecies?.message} {...register('studSpecies')} />
+      ) : null}
       <div>
         {length('coveringMm', 'Covering', 'What lies between the bracket and the stud.')}
         <div role="group" aria-label="Usual coverings" className="mt-2 flex flex-wrap gap-2">

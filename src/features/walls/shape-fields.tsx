@@ -2,7 +2,7 @@ import { LengthField } from '../../components/length-field.tsx';
 import { SelectField } from '../../components/select-field.tsx';
 import { TextField } from '../../components/text-field.tsx';
 import type { DraftErrors, WallDraft } from './wall-draft.ts';
-import { constructionWords, optionsOf } from './wall-words.ts';
+import { constructionWords, holdsInWood, optionsOf, studSpeciesOptions } from './wall-words.ts';
 
 interface Props {
   draft: WallDraft;
@@ -25,6 +25,17 @@ export function ShapeFields({ draft, errors, onChange }: Props) {
         onChange={(e) => onChange({ construction: e.target.value as WallDraft['construction'] })}
       />
       <LengthField label="Covering" hint="Between bracket and stud." value={draft.coveringMm} error={errors.coveringMm} onChange={(coveringMm) => onChange({ coveringMm })} />
+      {holdsInWood(draft.construction) ? (
+        <SelectField
+          className="sm:col-span-2"
+          label="Wood of the studs"
+          hint="Its species group, as stamped on the lumber. The number is the specific gravity G by NDS-2018; where in doubt take a lower one."
+          value={draft.studSpecies}
+          error={errors.studSpecies}
+          options={studSpeciesOptions}
+          onChange={(e) => onChange({ studSpecies: e.target.value as WallDraft['studSpecies'] })}
+        />
+      ) : null}
     </div>
   );
 }

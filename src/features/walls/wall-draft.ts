@@ -27,6 +27,7 @@ export interface WallDraft {
   heightMm: Typed;
   construction: WallShape['construction'];
   coveringMm: Typed;
+  studSpecies: WallShape['studSpecies'];
   studs: StudDraft[];
   obstructions: ObstructionDraft[];
 }
@@ -35,8 +36,8 @@ export interface WallDraft {
 export type DraftErrors = Record<string, string>;
 
 export function draftOf(wall: Wall): WallDraft {
-  const { name, widthMm, heightMm, construction, coveringMm, studs, obstructions } = wall;
-  return { name, widthMm, heightMm, construction, coveringMm, studs: inOrder(studs), obstructions: obstructions.map(obstructionDraft) };
+  const { name, widthMm, heightMm, construction, coveringMm, studSpecies, studs, obstructions } = wall;
+  return { name, widthMm, heightMm, construction, coveringMm, studSpecies, studs: inOrder(studs), obstructions: obstructions.map(obstructionDraft) };
 }
 
 function obstructionDraft({ outlineMm, ...rest }: Obstruction): ObstructionDraft {

@@ -1,4 +1,5 @@
-import type { constructions, obstructionKinds, waysFound } from '../../../shared/walls/wall.ts';
+import { studSpecies } from '../../../shared/hardware/stud-species.ts';
+import type { constructions, obstructionKinds, WallShape, waysFound } from '../../../shared/walls/wall.ts';
 
 export const constructionWords: Record<(typeof constructions)[number], string> = {
   'wood studs': 'Wood studs',
@@ -7,6 +8,11 @@ export const constructionWords: Record<(typeof constructions)[number], string> =
   masonry: 'Masonry',
   'solid wood': 'Solid wood',
 };
+
+/** Whether screws can hold in this wall's wood, so that its species counts. */
+export const holdsInWood = (construction: WallShape['construction']): boolean => construction === 'wood studs' || construction === 'plaster on lath' || construction === 'solid wood';
+
+export const studSpeciesOptions = Object.entries(studSpecies).map(([value, gravity]) => ({ value, words: `${value.charAt(0).toUpperCase()}${value.slice(1)} (${gravity.toFixed(2)})` }));
 
 export const foundByWords: Record<(typeof waysFound)[number], string> = {
   spacing: 'By spacing only',

@@ -37,6 +37,16 @@ describe('saving a layout', () => {
     expect((await browser.get(`/api/layouts/${layout.id}`)).body.frames).toEqual([frame]);
   });
 
+  it('keeps how far hangers were slid, and forgets it when they are slid back', async () => {
+    const { layout, frames } = await aLaidOutJob(browser, 1);
+    const frame = frames[0]!;
+    const slid = { ...frame, hangerSlides: { h1: 12.5, h2: -1 / 3 } };
+    const save = (version: number, before: object, after: object) => browser.post(`/api/layouts/${layout.id}/edits`).send({ version, edits: [{ kind: 'frame', frameId: frame.id, before, after }] }).expect(200);
+    expect((await save(layout.version, frame, slid)).body.frames).toEqual([slid]);
+    expect((await browser.get(`/api/layouts/${layout.id}`)).body.frames).toEqual([slid]);
+    expect((await save(layout.version + 1, slid, frame)).body.frames).toEqual([frame]);
+  });
+
   it('refuses a pattern that is not in the shop’s book, and a place that is no number, saving nothing', async () => {
     const { layout } = await aLaidOutJob(browser, 0);
     const strange = aFrame('6b1f6f9c-1c1a-4a0e-9c39-2f2d6a3b1c11');

@@ -28,6 +28,17 @@ describe('a wall', () => {
     expect((await owner.get(`/api/jobs/${jobId}/walls`).expect(200)).body).toContainEqual(saved.body);
   });
 
+  it('is of spruce-pine-fir until the shop says otherwise, and stays what it was told when something else is changed', async () => {
+    const { studSpecies: _left, ...plain } = aWallShape();
+    const wall = (await owner.post(`/api/jobs/${jobId}/walls`).send(plain).expect(201)).body as { id: string; version: number; studSpecies: string };
+    expect(wall.studSpecies).toBe('spruce-pine-fir');
+    await owner.patch(`/api/walls/${wall.id}`).send({ version: wall.version, studSpecies: 'southern pine' }).expect(200);
+    const named = await owner.patch(`/api/walls/${wall.id}`).send({ version: wall.version + 1, name: 'South wall' }).expect(200);
+    expect(named.body).toMatchObject({ name: 'South wall', studSpecies: 'southern pine' });
+    const wrong = await owner.patch(`/api/walls/${wall.id}`).send({ version: wall.version + 2, studSpecies: 'balsa' }).expect(400);
+    expect(wrong.body.fields).toEqual([{ path: 'studSpecies', words: 'This species group is not in the table.' }]);
+  });
+
   it('saved by two people is never overwritten in silence: the later is told what stands', async () => {
     const wall = await aWall();
     await owner.patch(`/api/walls/${wall.id}`).send({ version: wall.version, widthMm: 4000 }).expect(200);

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { applyEdits, compose, editsBetween, framesInOrder, invert, rebase, restate } from '../../../shared/layouts/edits.ts';
+import { applyEdits, compose, editsBetween, framesInOrder, invert, rebase, restate, sameFrame } from '../../../shared/layouts/edits.ts';
 import type { Edit, Frame, LayoutSheet } from '../../../shared/layouts/layout.ts';
 import { nextLabel, nextLetter } from '../../../shared/layouts/naming.ts';
 
@@ -114,9 +114,19 @@ describe('edits of a layout', () => {
     ['a move of a frame that is gone', [], { kind: 'frame', frameId: 'f1', before: frame, after: { ...frame, xMm: 150 } }],
     ['a placing where a frame of that id stands', [frame], { kind: 'frame', frameId: 'f1', before: null, after: { ...frame, xMm: 150 } }],
     ['an edit that speaks of one frame and carries another', [frame], { kind: 'frame', frameId: 'f1', before: frame, after: { ...frame, id: 'f2' } }],
+    ['a hanger slid in a frame whose hanger someone else slid', [{ ...frame, hangerSlides: { h1: 4 } }], { kind: 'frame', frameId: 'f1', before: frame, after: { ...frame, hangerSlides: { h1: 6 } } }],
     ['a reveal changed from one that no longer stands', [frame], { kind: 'sheet', before: { ...sheet, revealMm: 9 }, after: sheet }],
   ])('refuse %s, and say so', (_, frames, edit) => {
     expect(applyEdits(frames, sheet, [edit])).toEqual({ frames, sheet, conflicts: [edit] });
+  });
+});
+
+describe('a slide of nothing', () => {
+  it('is no slide at all', () => {
+    const frame: Frame = { id: 'f1', patternId: 'p1', xMm: 0, yMm: 0, turnRad: 0, flipped: false, locked: false, label: '1', contentsKg: null, hungGroup: null };
+    expect(sameFrame(frame, { ...frame, hangerSlides: {} })).toBe(true);
+    expect(sameFrame({ ...frame, hangerSlides: { h1: 0, h2: 3 } }, { ...frame, hangerSlides: { h2: 3 } })).toBe(true);
+    expect(sameFrame(frame, { ...frame, hangerSlides: { h2: 3 } })).toBe(false);
   });
 });
 

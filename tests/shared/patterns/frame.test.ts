@@ -152,6 +152,24 @@ describe('hangers', () => {
     );
   });
 
+  it('slid in their frame run along their member, whatever its turn and flip, and no farther than their allowance', () => {
+    const design = aDesign({ hangers: defaultHangers(aDesign()) });
+    const { id, allowanceMm: [low, high] } = design.hangers[0]!;
+    fc.assert(
+      fc.property(place, fc.double({ min: -500, max: 500, noNaN: true }), (at, slide) => {
+        const [as, other] = placedHangers(at, design);
+        const [now, still] = placedHangers({ ...at, hangerSlides: { [id]: slide } }, design);
+        const went = Math.min(Math.max(slide, low), high);
+        expect(distance(as!, now!)).toBeCloseTo(Math.abs(went), 6);
+        expect(distance(now!, now!.slide.from)).toBeCloseTo(went - low, 6);
+        expect(still).toEqual(other);
+        // The same way on the wall as on the pattern: a plain slide of the pattern's own hanger ends at the same place.
+        const moved = { ...design, hangers: design.hangers.map((h) => (h.id === id ? { ...h, alongMm: h.alongMm + went } : h)) };
+        expect(distance(placedHangers(at, moved)[0]!, now!)).toBeLessThan(1e-9);
+      }),
+    );
+  });
+
   it('by default are two on the upper members, in wood, side by side, their middle above the centre, whatever the shape', () => {
     fc.assert(
       fc.property(anyShape, (shape) => {

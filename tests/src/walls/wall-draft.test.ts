@@ -4,7 +4,7 @@ import { bodyOf, drawable, draftOf, isChanged } from '../../../src/features/wall
 
 const uuid = (n: number) => `00000000-0000-4000-8000-00000000000${n}`;
 const wall: Wall = {
-  id: uuid(1), jobId: uuid(2), version: 3, name: 'Stair wall', widthMm: 3600, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7,
+  id: uuid(1), jobId: uuid(2), version: 3, name: 'Stair wall', widthMm: 3600, heightMm: 2600, construction: 'wood studs', coveringMm: 12.7, studSpecies: 'spruce-pine-fir',
   studs: [{ id: uuid(3), xMm: 406.4, widthMm: 38.1, foundBy: 'probe', uncertaintyMm: 3 }],
   obstructions: [
     { id: uuid(4), kind: 'outlet', name: '', outlineMm: [[300, 250], [370, 250], [370, 364], [300, 364]], clearanceMm: 50 },
