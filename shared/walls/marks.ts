@@ -19,7 +19,9 @@ const sameOnPhoto = 0.005;
 /** Positions on a wall closer than this, mm, cannot be told apart with a tape. */
 const sameOnWallMm = 5;
 /** Three points count as in line where the triangle's height is less than this part of its longest side (about 1.7°). */
-const flat = 0.03;
+const flatPart = 0.03;
+/** Of many marks some three are always nearly in line, and a lens may bend those over: their turn says nothing below this. */
+const flatOfMany = 0.1;
 
 /**
  * Judges four or more marks before they are used: null where they are fit, else the first trouble found.
@@ -68,8 +70,8 @@ function inLine(marks: readonly Mark[]): MarksTrouble | null {
   });
   const first = bad[0];
   if (!first) return null;
-  const fours = marks.length === 4 ? [[0, 1, 2, 3]] : foursOf(marks.length);
-  if (fours.some((four) => !bad.some((b) => b.triple.every((i) => four.includes(i))))) return null;
+  const flatOnes = new Set(bad.map((b) => b.triple.join()));
+  if (hasFour(marks.length, (i, j, k) => !flatOnes.has([i, j, k].join()))) return null;
   return first.where === 'photo'
     ? { code: 'in line on photo', which: first.triple, words: `${name(first.triple)} lie nearly in one line on the photo, so the wall's slant cannot be read from them. Spread the marks into a four-cornered shape.` }
     : { code: 'in line on wall', which: first.triple, words: `${name(first.triple)} lie nearly in one line by the positions typed. Check the measures, or mark points that make a four-cornered shape.` };
@@ -79,6 +81,11 @@ function wrongOrder(marks: readonly Mark[]): MarksTrouble | null {
   const order = marks.map((_, i) => i);
   if (agrees(marks, order)) return null;
   const which = order;
+  const swapped = marks.length > 4 && marks.length <= mostToSort ? swaps(order).find((o) => agrees(marks, o)) : undefined;
+  if (swapped) {
+    const [a, b] = order.filter((i) => swapped[i] !== i);
+    return { code: 'wrong order', which: [a!, b!], order: swapped, words: `${name([a!, b!])} seem to have each other’s positions: with the two exchanged all marks go round the same way on the photo as on the wall.` };
+  }
   if (marks.length > 4) {
     return { code: 'wrong order', which, words: 'The marks do not go round the same way on the photo as on the wall. Check which position belongs to which mark.' };
   }
@@ -96,10 +103,11 @@ function wrongOrder(marks: readonly Mark[]): MarksTrouble | null {
 
 /** Whether every three marks turn oppositely in px (y down) and mm (y up), as they do on any photo from the front. */
 function agrees(marks: readonly Mark[], order: readonly number[]): boolean {
+  const least = marks.length > 4 ? flatOfMany : flatPart;
   return triplesOf(marks.length).every((triple) => {
     const px = triple.map((i) => at(marks, i).px);
     const mm = triple.map((i) => at(marks, order[i] ?? i).mm);
-    if (isFlat(px) || isFlat(mm)) return true;
+    if (isFlat(px, least) || isFlat(mm, least)) return true;
     return Math.sign(turn(px)) === -Math.sign(turn(mm));
   });
 }
@@ -116,7 +124,14 @@ function leanOf(marks: readonly Mark[], order: readonly number[]): number {
   return Math.abs(Math.atan2(b.x - a.x, a.y - b.y));
 }
 
-function isFlat(three: readonly Point[]): boolean {
+/** With more marks than this, each exchange of two is not tried. */
+const mostToSort = 12;
+
+function swaps(order: readonly number[]): number[][] {
+  return pairsOf(order.length).map(([a, b]) => order.map((v, i) => (i === a ? order[b]! : i === b ? order[a]! : v)));
+}
+
+function isFlat(three: readonly Point[], flat = flatPart): boolean {
   const longest = Math.max(distance(at(three, 0), at(three, 1)), distance(at(three, 1), at(three, 2)), distance(at(three, 0), at(three, 2)));
   return longest === 0 || Math.abs(turn(three)) / (longest * longest) < flat;
 }
@@ -155,8 +170,13 @@ function triplesOf(n: number): number[][] {
   return pairsOf(n).flatMap(([i, j]) => range(n).filter((k) => k > j).map((k) => [i, j, k]));
 }
 
-function foursOf(n: number): number[][] {
-  return triplesOf(n).flatMap((t) => range(n).filter((l) => l > at(t, 2)).map((l) => [...t, l]));
+/** Whether there are four of n, counted upwards, each three of which are good. */
+function hasFour(n: number, good: (i: number, j: number, k: number) => boolean): boolean {
+  for (let i = 0; i < n; i++) for (let j = i + 1; j < n; j++) for (let k = j + 1; k < n; k++) {
+    if (!good(i, j, k)) continue;
+    for (let l = k + 1; l < n; l++) if (good(i, j, l) && good(i, k, l) && good(j, k, l)) return true;
+  }
+  return false;
 }
 
 function range(n: number): number[] {
