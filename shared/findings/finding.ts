@@ -15,7 +15,7 @@ export interface Finding {
   frameIds: string[];
   /** `frameId/hangerId`. */
   hangerIds: string[];
-  figures: Figure[];
+  readonly figures: readonly Figure[];
   source: string;
 }
 
@@ -27,5 +27,6 @@ export interface Found {
   words: string;
   frameIds: string[];
   hangerIds?: string[];
-  figures?: Figure[];
+  /** The figures, or how to work them out once someone opens the finding. */
+  figures?: Figure[] | (() => Figure[]);
 }

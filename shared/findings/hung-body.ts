@@ -4,7 +4,8 @@ import { meetStud, type StudMeeting } from '../hanging/stud-zones.ts';
 import { loadDuration } from '../hardware/load-duration.ts';
 import { studSpecies } from '../hardware/stud-species.ts';
 import { connectionGravity } from '../hardware/timber.ts';
-import { placedMembers } from '../patterns/hangers.ts';
+import { placedInclination } from '../patterns/hangers.ts';
+import { membersOfDesign } from '../patterns/members.ts';
 import type { Hanger } from '../patterns/pattern.ts';
 import { hangerKey, type PlacedFrame } from './placed-frame.ts';
 import type { Surroundings } from './scene.ts';
@@ -18,6 +19,7 @@ export interface HungHanger {
   y: number;
   /** null where the wall has no studs to meet. */
   meeting: StudMeeting | null;
+  fixing: HangerFixing;
   check: HangerCheck;
 }
 
@@ -31,7 +33,7 @@ export interface AssessedBody {
 }
 
 /** A #10 wood screw, until one is chosen (common practice). */
-const usualDiameterMm = 4.826;
+export const usualDiameterMm = 4.826;
 
 /** Whether a screw can find wood behind the covering at the studs. */
 export const hasWoodStuds = ({ wall }: Surroundings): boolean => wall.construction === 'wood studs' || wall.construction === 'plaster on lath';
@@ -48,7 +50,8 @@ export function assessBody(id: string, frames: readonly PlacedFrame[], around: S
       const key = hangerKey(frame.frame, hanger);
       const screw = around.book.screws.find((s) => s.id === hanger.wallScrewId);
       const meeting = hasStuds(around) ? meetStud(at.x, screw?.diameterMm ?? usualDiameterMm, around.wall.studs) : null;
-      return { key, frame, hanger, x: at.x, y: at.y, meeting, check: checkHanger(loads.get(key)!, fixingOf(frame, hanger, meeting, around)) };
+      const fixing = fixingOf(frame, hanger, meeting, around);
+      return { key, frame, hanger, x: at.x, y: at.y, meeting, fixing, check: checkHanger(loads.get(key)!, fixing) };
     }),
   );
   return { id, frames, body, hanging, hangers };
@@ -85,12 +88,13 @@ function frameFixing({ frame, pattern: { design } }: PlacedFrame, hanger: Hanger
   const screw = book.screws.find((s) => s.id === screwId);
   if (!screw) return null;
   const lipMm = design.thicknessMm - (design.groove?.widthMm ?? 0);
+  const member = membersOfDesign(design)[hanger.member];
   const overGroove = design.groove !== null && hanger.insetMm > lipMm;
   return {
     screw,
     gravity: connectionGravity(design.species).value,
     // Beside the groove the lip is as deep as the frame; over it, only what the groove leaves.
     woodMm: design.depthMm - (overGroove ? design.groove!.depthMm : 0),
-    grainRad: placedMembers(frame, design)[hanger.member]?.inclinationRad ?? null,
+    grainRad: member ? placedInclination(frame, member) : null,
   };
 }

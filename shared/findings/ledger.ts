@@ -1,5 +1,6 @@
 import RBush from 'rbush';
 import type { Frame, LayoutPattern, LayoutSheet } from '../layouts/layout.ts';
+import type { Figure } from '../units/figure.ts';
 import { weights, type Finding, type Found } from './finding.ts';
 import { assessBody, type AssessedBody } from './hung-body.ts';
 import { placeFrame, type PlacedFrame } from './placed-frame.ts';
@@ -22,10 +23,17 @@ const patternRules: PatternRule[] = of('pattern');
 const bodyRules: BodyRule[] = of('body');
 const layoutRules: LayoutRule[] = of('layout');
 
-const told = (rule: Rule, found: Found): Finding => ({
-  id: `${rule.id}: ${found.about}`, rule: rule.id, title: rule.title, source: rule.source, weight: found.weight, words: found.words,
-  frameIds: found.frameIds, hangerIds: found.hangerIds ?? [], figures: found.figures ?? [],
-});
+function told(rule: Rule, found: Found): Finding {
+  const { figures } = found;
+  let made: readonly Figure[] | null = typeof figures === 'function' ? null : (figures ?? []);
+  return {
+    id: `${rule.id}: ${found.about}`, rule: rule.id, title: rule.title, source: rule.source, weight: found.weight, words: found.words,
+    frameIds: found.frameIds, hangerIds: found.hangerIds ?? [],
+    get figures() {
+      return (made ??= typeof figures === 'function' ? figures() : []);
+    },
+  };
+}
 
 interface Entry { minX: number; minY: number; maxX: number; maxY: number; placed: PlacedFrame }
 
@@ -37,7 +45,9 @@ export function createLedger(): (scene: Scene) => Ledger {
   let around: Surroundings | null = null;
   let sheet: LayoutSheet | null = null;
   const frames = new Map<string, { frame: Frame; pattern: LayoutPattern; placed: PlacedFrame; findings: Finding[]; entry: Entry }>();
-  const pairs = new Map<string, { a: PlacedFrame; b: PlacedFrame; findings: Finding[] }>();
+  /** Findings of frames that are near one another, under the frame and the other's id; pairs without a finding are not kept. */
+  const pairs = new Map<PlacedFrame, Map<string, Finding[]>>();
+  let changed = new Set<PlacedFrame>();
   const bodies = new Map<string, { members: readonly PlacedFrame[]; body: AssessedBody; findings: Finding[] }>();
   const patterns = new Map<string, { pattern: LayoutPattern; found: { rule: PatternRule; found: Omit<Found, 'frameIds'> }[] }>();
   let index = new RBush<Entry>();
@@ -45,6 +55,7 @@ export function createLedger(): (scene: Scene) => Ledger {
   function forget(): void {
     frames.clear();
     pairs.clear();
+    changed = new Set();
     bodies.clear();
     patterns.clear();
     index = new RBush<Entry>();
@@ -55,13 +66,17 @@ export function createLedger(): (scene: Scene) => Ledger {
       around = { wall: scene.wall, book: scene.book, limits: scene.limits };
       forget();
     }
-    if (sheet !== scene.sheet) pairs.clear();
+    const sheetChanged = sheet !== scene.sheet;
     sheet = scene.sheet;
     const byId = new Map(scene.patterns.map((p) => [p.id, p]));
     const placedNow = placeAll(scene.frames, byId, around);
+    if (sheetChanged) {
+      pairs.clear();
+      changed = new Set(placedNow);
+    }
     const findings = [
       ...placedNow.flatMap((p) => frames.get(p.frame.id)!.findings),
-      ...pairFindings(placedNow, scene.sheet, around),
+      ...pairFindings(scene.sheet, around),
       ...bodyFindings(placedNow, around),
       ...patternFindings(placedNow, around),
       ...layoutRules.flatMap((rule) => rule.check(scene).map((f) => told(rule, f))),
@@ -78,42 +93,57 @@ export function createLedger(): (scene: Scene) => Ledger {
       seen.add(frame.id);
       let known = frames.get(frame.id);
       if (!known || known.frame !== frame || known.pattern !== pattern) {
-        if (known) index.remove(known.entry);
+        if (known) takeOut(known);
         const placed = placeFrame(frame, pattern);
         const { left, bottom, right, top } = placed.box;
         known = { frame, pattern, placed, entry: { minX: left, minY: bottom, maxX: right, maxY: top, placed }, findings: frameRules.flatMap((rule) => rule.check(placed, env).map((f) => told(rule, f))) };
         index.insert(known.entry);
+        changed.add(placed);
         frames.set(frame.id, known);
       }
       result.push(known.placed);
     }
     for (const [id, gone] of frames) {
       if (seen.has(id)) continue;
-      index.remove(gone.entry);
+      takeOut(gone);
       frames.delete(id);
     }
     return result;
   }
 
-  function pairFindings(list: readonly PlacedFrame[], on: LayoutSheet, env: Surroundings): Finding[] {
-    const result: Finding[] = [];
-    const seen = new Set<string>();
-    for (const a of list) {
-      const near = index.search({ minX: a.box.left - slimGapMm, minY: a.box.bottom - slimGapMm, maxX: a.box.right + slimGapMm, maxY: a.box.top + slimGapMm });
-      for (const { placed: b } of near) {
-        if (b.frame.id <= a.frame.id) continue;
-        const key = `${a.frame.id}+${b.frame.id}`;
-        seen.add(key);
-        let known = pairs.get(key);
-        if (!known || known.a !== a || known.b !== b) {
-          known = { a, b, findings: pairRules.flatMap((rule) => rule.check(a, b, on, env).map((f) => told(rule, f))) };
-          pairs.set(key, known);
-        }
-        result.push(...known.findings);
+  function takeOut({ placed, entry }: { placed: PlacedFrame; entry: Entry }): void {
+    index.remove(entry);
+    changed.delete(placed);
+    for (const other of pairs.get(placed)?.keys() ?? []) {
+      const its = frames.get(other);
+      if (its) pairs.get(its.placed)?.delete(placed.frame.id);
+    }
+    pairs.delete(placed);
+  }
+
+  /** Only what changed is held against its neighbours; what two frames that stayed had to say to one another stands. */
+  function pairFindings(on: LayoutSheet, env: Surroundings): Finding[] {
+    for (const placed of changed) {
+      const { left, bottom, right, top } = placed.box;
+      for (const { placed: other } of index.search({ minX: left - slimGapMm, minY: bottom - slimGapMm, maxX: right + slimGapMm, maxY: top + slimGapMm })) {
+        if (other === placed || (changed.has(other) && other.frame.id < placed.frame.id)) continue;
+        const [a, b] = placed.frame.id < other.frame.id ? [placed, other] : [other, placed];
+        const found = pairRules.flatMap((rule) => rule.check(a, b, on, env).map((f) => told(rule, f)));
+        if (found.length === 0) continue;
+        keep(a, b.frame.id, found);
+        keep(b, a.frame.id, found);
       }
     }
-    for (const key of pairs.keys()) if (!seen.has(key)) pairs.delete(key);
+    changed.clear();
+    const result: Finding[] = [];
+    for (const [placed, others] of pairs) for (const [id, found] of others) if (placed.frame.id < id) result.push(...found);
     return result;
+  }
+
+  function keep(of: PlacedFrame, other: string, found: Finding[]): void {
+    let others = pairs.get(of);
+    if (!others) pairs.set(of, (others = new Map()));
+    others.set(other, found);
   }
 
   function bodyFindings(list: readonly PlacedFrame[], env: Surroundings): Finding[] {
@@ -161,7 +191,14 @@ export const findingsOf = (scene: Scene): Finding[] => createLedger()(scene).fin
 
 const rank = new Map(rules.map((r, i) => [r.id, i]));
 
-/** Stops first, then cautions, then notes; within a weight by rule. */
+/** Stops first, then cautions, then notes; within a weight by rule, and of one rule as they came. */
 function inOrder(findings: Finding[]): Finding[] {
-  return findings.sort((a, b) => weights.indexOf(a.weight) - weights.indexOf(b.weight) || (rank.get(a.rule) ?? 0) - (rank.get(b.rule) ?? 0));
+  const drawers = new Map<number, Finding[]>();
+  for (const finding of findings) {
+    const place = weights.indexOf(finding.weight) * rules.length + (rank.get(finding.rule) ?? 0);
+    const drawer = drawers.get(place);
+    if (drawer) drawer.push(finding);
+    else drawers.set(place, [finding]);
+  }
+  return [...drawers].sort((a, b) => a[0] - b[0]).flatMap(([, list]) => list);
 }

@@ -10,28 +10,43 @@ export interface Gap {
 
 /** The shortest way from the rim of `a` to the rim of `b`, for any two simple rings; 0 long where they touch, cross or one holds the other. */
 export function gapBetween(a: Polygon, b: Polygon): Gap {
-  const sidesA = sidesOf(a);
-  const sidesB = sidesOf(b);
   const inside = a.find((p) => contains(b, p)) ?? b.find((p) => contains(a, p));
   if (inside) return { mm: 0, from: inside, to: inside };
-  let best: Gap = { mm: Infinity, from: { x: 0, y: 0 }, to: { x: 0, y: 0 } };
+  const sidesA = sidesOf(a);
+  const sidesB = sidesOf(b);
+  // Two segments that do not cross are nearest at an end of one of them.
+  let least = Infinity;
+  let best: { side: Segment; end: Point; endOf: 'a' | 'b' } | null = null;
   for (const sideA of sidesA) {
     for (const sideB of sidesB) {
       if (segmentsCross(sideA, sideB)) return { mm: 0, from: sideA.from, to: sideA.from };
-      for (const gap of endToSide(sideA, sideB)) if (gap.mm < best.mm) best = gap;
+      const fromA = squaredToSegment(sideB, sideA.from);
+      if (fromA < least) {
+        least = fromA;
+        best = { side: sideB, end: sideA.from, endOf: 'a' };
+      }
+      const fromB = squaredToSegment(sideA, sideB.from);
+      if (fromB < least) {
+        least = fromB;
+        best = { side: sideA, end: sideB.from, endOf: 'b' };
+      }
     }
   }
-  return best;
+  if (!best) return { mm: Infinity, from: { x: 0, y: 0 }, to: { x: 0, y: 0 } };
+  const on = nearestOn(best.side, best.end);
+  const mm = distance(best.end, on);
+  return best.endOf === 'a' ? { mm, from: best.end, to: on } : { mm, from: on, to: best.end };
 }
 
-/** Two segments that do not cross are nearest at an end of one of them. */
-function endToSide(a: Segment, b: Segment): Gap[] {
-  const onB = nearestOn(b, a.from);
-  const onA = nearestOn(a, b.from);
-  return [
-    { mm: distance(a.from, onB), from: a.from, to: onB },
-    { mm: distance(onA, b.from), from: onA, to: b.from },
-  ];
+/** Square of the distance from a point to a segment: `nearestOn` without its point, for the many that are only compared. */
+function squaredToSegment({ from, to }: Segment, point: Point): number {
+  const dx = to.x - from.x;
+  const dy = to.y - from.y;
+  const squared = dx * dx + dy * dy;
+  const share = squared === 0 ? 0 : Math.min(1, Math.max(0, ((point.x - from.x) * dx + (point.y - from.y) * dy) / squared));
+  const x = from.x + share * dx - point.x;
+  const y = from.y + share * dy - point.y;
+  return x * x + y * y;
 }
 
 export const distanceBetween = (a: Polygon, b: Polygon): number => gapBetween(a, b).mm;
@@ -47,19 +62,29 @@ export function distanceToRim(polygon: Polygon, point: Point): number {
  */
 export function overlapDepth(a: Polygon, b: Polygon): number {
   let least = Infinity;
-  for (const { from, to } of [...sidesOf(a), ...sidesOf(b)]) {
-    const length = distance(from, to);
-    if (length === 0) continue;
-    const axis = { x: (to.y - from.y) / length, y: (from.x - to.x) / length };
-    const spanA = spanAlong(a, axis);
-    const spanB = spanAlong(b, axis);
-    least = Math.min(least, spanA.high - spanB.low, spanB.high - spanA.low);
+  for (const ring of [a, b]) {
+    for (const { from, to } of sidesOf(ring)) {
+      const length = distance(from, to);
+      if (length === 0) continue;
+      const axis = { x: (to.y - from.y) / length, y: (from.x - to.x) / length };
+      const spanA = spanAlong(a, axis);
+      const spanB = spanAlong(b, axis);
+      least = Math.min(least, spanA.high - spanB.low, spanB.high - spanA.low);
+      // One axis that parts them settles it.
+      if (least <= 0) return 0;
+    }
   }
-  return Math.max(0, least);
+  return least === Infinity ? 0 : least;
 }
 
 /** Lowest and highest reach of a polygon along a unit vector. */
 export function spanAlong(polygon: Polygon, axis: Point): { low: number; high: number } {
-  const reach = polygon.map((p) => p.x * axis.x + p.y * axis.y);
-  return { low: Math.min(...reach), high: Math.max(...reach) };
+  let low = Infinity;
+  let high = -Infinity;
+  for (const p of polygon) {
+    const reach = p.x * axis.x + p.y * axis.y;
+    if (reach < low) low = reach;
+    if (reach > high) high = reach;
+  }
+  return { low, high };
 }

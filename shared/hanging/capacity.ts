@@ -52,7 +52,8 @@ export interface LinkCheck {
   /** Demand over capacity; Infinity where the link carries nothing. */
   utilisation: number;
   mode: YieldMode | null;
-  figures: Figure[];
+  /** Worked out when first asked for: most links of a layout are never opened. */
+  readonly figures: Figure[];
 }
 
 export interface HangerCheck {
@@ -129,8 +130,8 @@ function frameLink(load: HangerLoad, fixing: HangerFixing, flags: CapacityFlag[]
 function screwLink(part: HangerPart, load: HangerLoad, screws: number, value: ScrewCapacity, headHolds: boolean, of: Parameters<typeof screwFigures>[3]): LinkCheck {
   const one = headHolds ? allowedOnScrew(value, load.angleRad) : 0;
   const capacityN = one * screws;
-  const link = { part, capacityN, demandN: load.resultantN, utilisation: ratio(load.resultantN, capacityN), mode: value.mode };
-  return { ...link, figures: screwFigures(load, screws, value, of, one, link.utilisation) };
+  const utilisation = ratio(load.resultantN, capacityN);
+  return link(part, load, capacityN, utilisation, value.mode, () => screwFigures(load, screws, value, of, one, utilisation));
 }
 
 /**
@@ -168,7 +169,7 @@ function anchorLink(load: HangerLoad, anchor: AnchorBody, count: number, flags: 
   // V/Va + T/Ta ≤ 1, the straight-line interaction.
   const utilisation = ratio(load.shearN, allowed.shearN * count) + ratio(load.tensionN, allowed.tensionN * count);
   const capacityN = utilisation > 0 ? load.resultantN / utilisation : Math.min(allowed.shearN, allowed.tensionN) * count;
-  return { part: 'wall', capacityN, demandN: load.resultantN, utilisation, mode: null, figures: anchorFigures(load, anchor, allowed, count, utilisation) };
+  return link('wall', load, capacityN, utilisation, null, () => anchorFigures(load, anchor, allowed, count, utilisation));
 }
 
 function bracketLink(load: HangerLoad, { bracket }: HangerFixing, flags: CapacityFlag[]): LinkCheck {
@@ -181,11 +182,21 @@ function bracketLink(load: HangerLoad, { bracket }: HangerFixing, flags: Capacit
   }
   const capacityN = bracket.ratingN ?? 0;
   const utilisation = ratio(load.resultantN, capacityN);
-  return { part: 'bracket', capacityN, demandN: load.resultantN, utilisation, mode: null, figures: bracketFigures(load, bracket, utilisation) };
+  return link('bracket', load, capacityN, utilisation, null, () => bracketFigures(load, bracket, utilisation));
 }
 
 function nothing(part: HangerPart, load: HangerLoad): LinkCheck {
-  return { part, capacityN: 0, demandN: load.resultantN, utilisation: ratio(load.resultantN, 0), mode: null, figures: [] };
+  return link(part, load, 0, ratio(load.resultantN, 0), null, () => []);
+}
+
+function link(part: HangerPart, load: HangerLoad, capacityN: number, utilisation: number, mode: YieldMode | null, make: () => Figure[]): LinkCheck {
+  let made: Figure[] | null = null;
+  return {
+    part, capacityN, demandN: load.resultantN, utilisation, mode,
+    get figures() {
+      return (made ??= make());
+    },
+  };
 }
 
 const ratio = (demand: number, capacity: number): number => (demand === 0 ? 0 : demand / capacity);

@@ -35,6 +35,8 @@ export interface SeekPlace {
 export const parts = 1e6;
 export const whole = (mm: number): number => Math.round(mm * parts);
 
+const tenths = (mm: number): string => `${Math.round(mm * 10) / 10} mm`;
+
 /** All studs of a wall, in millionths, left to right. */
 export class Studs {
   readonly ids: readonly string[];
@@ -137,7 +139,7 @@ export class Reach {
     return Math.min(Math.max((this.studs.at[k] as number) - this.x - shift, this.down), this.up);
   }
 
-  place(shift: number): SeekPlace {
+  place(shift: number, lengthText = tenths): SeekPlace {
     const { id, frameId } = this.hanger;
     const { stud, margin } = this.best(shift);
     const met = stud >= 0 && margin >= 0;
@@ -145,13 +147,13 @@ export class Reach {
     const slide = met ? this.slide(stud, shift) : 0;
     return {
       id, frameId, studId: met ? (this.studs.ids[stud] ?? null) : null, slideMm: slide / parts, xMm: (this.x + shift + slide) / parts,
-      marginMm: stud < 0 ? null : margin / parts, words: this.words(stud, margin, slide, shift),
+      marginMm: stud < 0 ? null : margin / parts, words: this.words(stud, margin, slide, shift, lengthText),
     };
   }
 
-  private words(stud: number, margin: number, slide: number, shift: number): string {
+  private words(stud: number, margin: number, slide: number, shift: number, lengthText: (mm: number) => string): string {
     if (stud < 0) return 'No studs are marked on this wall.';
-    const mm = (v: number) => `${Math.round(Math.abs(v) / (parts / 10)) / 10} mm`;
+    const mm = (v: number) => lengthText(Math.abs(v) / parts);
     if (margin < 0) {
       if (this.half(stud) < 0) return 'The nearest stud is not known well enough for so thick a screw.';
       return `Misses the nearest stud by ${mm(margin)} even when slid as far as it may.`;

@@ -9,6 +9,8 @@ export interface SeekInput {
   allowed: readonly Range[];
   /** How many hangers of a frame must meet studs; all of them where nothing is said. */
   neededByFrame?: Readonly<Record<string, number>>;
+  /** How lengths are written in the words of each place; mm unless told otherwise. */
+  lengthText?: (mm: number) => string;
 }
 
 /** What a shift achieves, in the order in which it is judged. */
@@ -64,7 +66,7 @@ export function seekStuds(input: SeekInput): SeekResult {
   return {
     shiftMm: shift / parts,
     score: scoreOf(hangers.map((h) => h.best(shift).margin), frames),
-    places: hangers.map((h) => h.place(shift)),
+    places: hangers.map((h) => h.place(shift, input.lengthText)),
     ties: ties.map(([from, to]) => ({ fromMm: from / parts, toMm: to / parts })),
     today,
     slidOnly,

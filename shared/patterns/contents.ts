@@ -1,8 +1,8 @@
 import type { Placement } from '../geometry/point.ts';
 import { KG_PER_POUND, MM_PER_FOOT, STANDARD_GRAVITY } from '../units/constants.ts';
 import type { Figure } from '../units/figure.ts';
-import { nearLevelRad, placedMembers } from './hangers.ts';
-import type { Member } from './members.ts';
+import { nearLevelRad, placedInclination } from './hangers.ts';
+import { membersOfDesign, type Member } from './members.ts';
 import type { PatternDesign } from './pattern.ts';
 
 /** 15 lb/ft² in kg/m² (0.72 kPa): the shelf test load of ANSI/KCMA A161.1, section 5.1, read in a secondary page. */
@@ -20,8 +20,8 @@ export interface Contents {
 type ContentsForm = Pick<PatternDesign, 'shape' | 'thicknessMm' | 'depthMm' | 'contentsKg'>;
 
 /** Members of a frame as it hangs whose inner faces look up and lie within 35° of level: its floor. */
-export function floorMembers(frame: Placement, design: Pick<PatternDesign, 'shape' | 'thicknessMm'>): Member[] {
-  return placedMembers(frame, design).filter(({ inclinationRad, shortPointMm }) => Math.abs(inclinationRad) <= nearLevelRad + 1e-9 && shortPointMm > 0);
+export function floorMembers(frame: Placement, design: Pick<PatternDesign, 'shape' | 'thicknessMm'>): Pick<Member, 'index' | 'shortPointMm'>[] {
+  return membersOfDesign(design).filter((member) => Math.abs(placedInclination(frame, member)) <= nearLevelRad + 1e-9 && member.shortPointMm > 0);
 }
 
 /**

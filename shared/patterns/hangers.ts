@@ -1,7 +1,7 @@
 import { placed, type Placement, type Point, type Segment } from '../geometry/point.ts';
 import { boxOf, placedAll, reversed } from '../geometry/polygon.ts';
 import { frameGeometry, type FrameForm } from './frame.ts';
-import { membersOf, type Member } from './members.ts';
+import { membersOf, membersOfDesign, type Member } from './members.ts';
 import { outlineOf } from './outline.ts';
 import type { Hanger, PatternDesign } from './pattern.ts';
 
@@ -19,8 +19,7 @@ type HangerPlace = Pick<Hanger, 'member' | 'alongMm' | 'insetMm'>;
 
 /** A place told along a member, in the pattern's own coordinates, mm. Throws a RangeError where the frame has no such member. */
 export function hangerPosition(design: Pick<PatternDesign, 'shape' | 'thicknessMm'>, hanger: HangerPlace): Point {
-  const members = membersOf(outlineOf(design.shape), design.thicknessMm);
-  return alongMember(memberOf(members, hanger.member), hanger.alongMm, hanger.insetMm);
+  return alongMember(memberOf(membersOfDesign(design), hanger.member), hanger.alongMm, hanger.insetMm);
 }
 
 function memberOf(members: readonly Member[], index: number): Member {
@@ -49,12 +48,18 @@ export function placedMembers(frame: Placement, design: Pick<PatternDesign, 'sha
   return frame.flipped ? members.map((_, index) => ({ ...members[n - 1 - index]!, index })) : members;
 }
 
+/** The direction of a member's outer side on the wall, (−π, π]. Flipped, a ring is run the other way, so that the direction is mirrored top for bottom. */
+export function placedInclination(frame: Placement, member: Pick<Member, 'inclinationRad'>): number {
+  const rad = frame.turnRad + (frame.flipped ? -member.inclinationRad : member.inclinationRad);
+  return Math.atan2(Math.sin(rad), Math.cos(rad));
+}
+
 /** A frame's place and what its own hangers were slid by, mm along their members; see `Frame`. */
 export type HangerPlacement = Placement & { hangerSlides?: Readonly<Record<string, number>> };
 
 /** The hangers of a frame on the wall, in the design's order. No hanger is slid beyond its allowance, even where that was made less since. */
 export function placedHangers(frame: HangerPlacement, design: Pick<PatternDesign, 'shape' | 'thicknessMm' | 'hangers'>): PlacedHanger[] {
-  const members = membersOf(outlineOf(design.shape), design.thicknessMm);
+  const members = membersOfDesign(design);
   return design.hangers.map((hanger) => {
     const member = memberOf(members, hanger.member);
     const at = (offset: number): Point => placed(alongMember(member, hanger.alongMm + offset, hanger.insetMm), frame);

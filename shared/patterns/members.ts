@@ -1,5 +1,7 @@
 import { distance, type Point } from '../geometry/point.ts';
 import { exteriorAngles, sidesOf } from '../geometry/polygon.ts';
+import { outlineOf } from './outline.ts';
+import type { Shape } from './shape.ts';
 
 /** How an end of a member is cut. */
 export interface MemberEnd {
@@ -53,6 +55,15 @@ export function membersOf(outline: readonly Point[], thicknessMm: number): Membe
       innerTo: inner(longPointMm - cutAtEnd),
     };
   });
+}
+
+const known = new WeakMap<Shape, { thicknessMm: number; members: readonly Member[] }>();
+
+/** Members of a design in its own coordinates, worked out once: shapes are never changed in place. */
+export function membersOfDesign({ shape, thicknessMm }: { shape: Shape; thicknessMm: number }): readonly Member[] {
+  let kept = known.get(shape);
+  if (kept?.thicknessMm !== thicknessMm) known.set(shape, (kept = { thicknessMm, members: membersOf(outlineOf(shape), thicknessMm) }));
+  return kept.members;
 }
 
 const endOf = (bevelRad: number): MemberEnd => ({ bevelRad, fromEdgeRad: Math.PI / 2 - bevelRad });

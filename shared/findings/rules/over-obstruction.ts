@@ -1,4 +1,4 @@
-import type { Polygon } from '../../geometry/polygon.ts';
+import { boxOf, type Box, type Polygon } from '../../geometry/polygon.ts';
 import { distanceBetween } from '../../geometry/polygon-distance.ts';
 import { overlapArea } from '../../geometry/polygon-overlap.ts';
 import { formatLength } from '../../units/length.ts';
@@ -16,6 +16,17 @@ function ringOf(obstruction: Obstruction): Polygon {
   return ring;
 }
 
+const boxes = new WeakMap<Obstruction, Box>();
+
+function boxOfObstruction(obstruction: Obstruction): Box {
+  let box = boxes.get(obstruction);
+  if (!box) boxes.set(obstruction, (box = boxOf(ringOf(obstruction))));
+  return box;
+}
+
+/** Whether two boxes alone show that there is room enough between what lies in them. */
+const clearly = (a: Box, b: Box, mm: number): boolean => Math.max(a.left - b.right, b.left - a.right, a.bottom - b.top, b.bottom - a.top) > mm;
+
 export const overObstruction: FrameRule = {
   id: 'over an obstruction',
   of: 'frame',
@@ -24,6 +35,7 @@ export const overObstruction: FrameRule = {
   check(placed, { wall, limits }) {
     return wall.obstructions.flatMap((obstruction): Found[] => {
       const ring = ringOf(obstruction);
+      if (clearly(placed.box, boxOfObstruction(obstruction), obstruction.clearanceMm)) return [];
       const what = obstruction.name || obstruction.kind;
       const about = `${placed.frame.id}+${obstruction.id}`;
       const frameIds = [placed.frame.id];

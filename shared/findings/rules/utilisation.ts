@@ -21,7 +21,7 @@ export const utilisation: BodyRule = {
         words: [`A hanger of ${nameOf(h.frame)} ${used} ${partWords[h.check.worst]}.`, ...why].join(' '),
         frameIds: [h.frame.frame.id],
         hangerIds: [h.key],
-        figures: [...link.figures, ...loadFigures(body.body, body.hanging, h.key)],
+        figures: () => [...link.figures, ...loadFigures(body.body, body.hanging, h.key)],
       };
     });
   },
