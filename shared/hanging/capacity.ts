@@ -1,6 +1,7 @@
 import { anchorAllowable, type AnchorBody } from '../hardware/anchors.ts';
+import { feelsGrain } from '../hardware/bearing.ts';
 import type { BracketBody } from '../hardware/brackets.ts';
-import { combinedLoad, screwCapacity, type ScrewCapacity } from '../hardware/dowel.ts';
+import { combinedLoad, screwCapacity, type ScrewCapacity, type ScrewJoint } from '../hardware/dowel.ts';
 import type { ScrewBody } from '../hardware/screws.ts';
 import type { YieldMode } from '../hardware/yield-limit.ts';
 import { MM_PER_INCH } from '../units/constants.ts';
@@ -102,7 +103,7 @@ function wallLink(load: HangerLoad, fixing: HangerFixing, flags: CapacityFlag[])
   const { screw, gravity, coveringMm, woodMm } = wall;
   // Studs stand upright: the angle to the grain is that of the load to plumb.
   const angleToGrainRad = Math.atan2(Math.abs(load.shear.x), Math.abs(load.shear.y));
-  const value = screwCapacity({ screw, plateMm: bracket.steelMm, gapMm: coveringMm, gravity, woodMm, angleToGrainRad, loadDuration: fixing.loadDuration });
+  const value = valueOf({ screw, plateMm: bracket.steelMm, gapMm: coveringMm, gravity, woodMm, angleToGrainRad, loadDuration: fixing.loadDuration });
   flagScrew('wall', screw, value, bracket, flags);
   if (value.mode !== null && value.lateralReferenceN < value.lateralWithoutGapN / 2) {
     flags.push({ id: 'covering halves lateral', part: 'wall', words: 'The covering between bracket and stud cuts what the screw carries sideways by more than half.' });
@@ -122,7 +123,7 @@ function frameLink(load: HangerLoad, fixing: HangerFixing, flags: CapacityFlag[]
   const { screw, gravity, woodMm, grainRad } = frame;
   const toMember = grainRad === null ? Math.PI / 2 : Math.abs(Math.atan2(load.shear.y, load.shear.x) - grainRad) % Math.PI;
   const angleToGrainRad = load.shearN === 0 ? 0 : Math.min(toMember, Math.PI - toMember);
-  const value = screwCapacity({ screw, plateMm: bracket.steelMm, gapMm: 0, gravity, woodMm, angleToGrainRad, loadDuration: fixing.loadDuration });
+  const value = valueOf({ screw, plateMm: bracket.steelMm, gapMm: 0, gravity, woodMm, angleToGrainRad, loadDuration: fixing.loadDuration });
   flagScrew('frame', screw, value, null, flags);
   return screwLink('frame', load, bracket.frameScrews, value, true, { screw, bracket, coveringMm: 0, gravity, loadDuration: fixing.loadDuration });
 }
@@ -132,6 +133,21 @@ function screwLink(part: HangerPart, load: HangerLoad, screws: number, value: Sc
   const capacityN = one * screws;
   const utilisation = ratio(load.resultantN, capacityN);
   return link(part, load, capacityN, utilisation, value.mode, () => screwFigures(load, screws, value, of, one, utilisation));
+}
+
+const values = new WeakMap<ScrewBody, Map<string, ScrewCapacity>>();
+const mostKept = 200;
+
+/** The screw's values, kept for the next hanger that sits alike. A screw under 1/4 in does not feel the grain, so the angle is all one to it. */
+function valueOf(joint: ScrewJoint): ScrewCapacity {
+  const { screw, plateMm, gapMm, gravity, woodMm, loadDuration } = joint;
+  const angleToGrainRad = feelsGrain(screw.diameterMm) ? joint.angleToGrainRad : 0;
+  const key = `${plateMm} ${gapMm} ${gravity} ${woodMm} ${angleToGrainRad} ${loadDuration}`;
+  let kept = values.get(screw);
+  if (!kept || kept.size >= mostKept) values.set(screw, (kept = new Map()));
+  let value = kept.get(key);
+  if (!value) kept.set(key, (value = screwCapacity({ ...joint, angleToGrainRad })));
+  return value;
 }
 
 /**
