@@ -16,6 +16,9 @@ interface Edge {
   ux: number;
   uy: number;
   length: number;
+  /** Outward from the frame at `a`, halfway between its two edges there; a unit vector. */
+  tipX: number;
+  tipY: number;
 }
 
 /** The edges of all frames that stay, in a spatial index. Built once when a drag begins. */
@@ -29,6 +32,8 @@ export interface EdgeField {
 export interface SnapAsk {
   /** Outline of the moved frame about its own centroid, as its pattern gives it; counter-clockwise, convex. */
   outline: Polygon;
+  /** Outlines of more frames, about the same point, that move with it as one body. */
+  body?: readonly Polygon[];
   /** Where the hand holds it. */
   placement: Placement;
   revealMm: number;
@@ -38,13 +43,17 @@ export interface SnapAsk {
   maxTurnRad: number;
 }
 
-/** How the frame sits along the shared edge: a corner opposite a corner, at the reveal from a second frame too, or anywhere. */
-export type SnapFit = 'corner' | 'second frame' | 'along';
+/**
+ * How the frame sits along the shared edge: a corner opposite a corner, at the reveal from a second frame too, or
+ * anywhere. 'tip' shares no edge: a corner points at a corner.
+ */
+export type SnapFit = 'corner' | 'second frame' | 'along' | 'tip';
 
 export interface Snap {
   placement: Placement;
   fit: SnapFit;
-  /** Edge of the moved outline and the neighbour's edge that face each other. */
+  /** Which outline of the body meets (0 is the first), and its edge and the neighbour's that face each other; for a tip, the corners they begin at. */
+  outline: number;
   edge: number;
   frameId: string;
   neighbourEdge: number;
@@ -60,6 +69,8 @@ export interface Snap {
 const PARALLEL = 1e-9;
 /** Two frames share an edge only where their edges face each other over at least this share of the shorter one. */
 const LEAST_SHARE = 0.1;
+/** A corner points at another where the angle between their ways out is more than 120° (its cosine under this). */
+const FACING = -0.5;
 
 /** Puts the outlines of the frames that stay into an index. */
 export function edgeField(neighbours: readonly Neighbour[]): EdgeField {
@@ -87,38 +98,90 @@ function grown({ left, bottom, right, top }: Box, by: number): Box {
 }
 
 function edgesOf(frameId: string, outline: Polygon): Edge[] {
-  return sidesOf(outline).map(({ from: a, to: b }, number) => {
-    const length = Math.hypot(b.x - a.x, b.y - a.y);
-    return { frameId, number, a, ux: (b.x - a.x) / length, uy: (b.y - a.y) / length, length };
+  const sides = sidesOf(outline).map(({ from, to }) => {
+    const length = Math.hypot(to.x - from.x, to.y - from.y);
+    return { a: from, ux: (to.x - from.x) / length, uy: (to.y - from.y) / length, length };
+  });
+  return sides.map((side, number) => {
+    const before = sides[(number + sides.length - 1) % sides.length]!;
+    const nx = before.uy + side.uy;
+    const ny = -before.ux - side.ux;
+    const size = Math.hypot(nx, ny) || 1;
+    return { frameId, number, ...side, tipX: nx / size, tipY: ny / size };
   });
 }
 
+/** One outline of what the hand holds, and the edges it could meet. */
+interface Part {
+  outline: Polygon;
+  held: Polygon;
+  edges: readonly Edge[];
+  near: readonly Edge[];
+}
+
+function partsOf(field: EdgeField, { outline, body = [], placement }: SnapAsk, reachOf: (outline: Polygon) => number): Part[] {
+  return [outline, ...body].map((own) => {
+    const held = placedAll(own, placement);
+    return { outline: own, held, edges: edgesOf('', held), near: field.near(grown(boxOf(held), reachOf(own))) };
+  });
+}
+
+const radiusOf = (outline: Polygon) => Math.max(...outline.map((p) => Math.hypot(p.x, p.y)));
+
+/** Most places tried before a crowded spot is left without a snap. */
+const mostTried = 80;
+
 /**
- * The strongest snap for a frame held near others, or null where none is in reach. Edges are laid parallel and at
- * the reveal; along the shared edge the frame takes, where one is in reach, the place at which corners face each
- * other or at which a second frame is met at the reveal too. No snap makes frames overlap.
+ * The strongest snap for a frame, or a body of frames, held near others; null where none is in reach. Edges are laid
+ * parallel and at the reveal; along the shared edge the frame takes, where one is in reach, the place at which corners
+ * face each other or at which a second frame is met at the reveal too. No snap makes frames overlap.
  */
 export function strongestSnap(field: EdgeField, ask: SnapAsk): Snap | null {
-  const radius = Math.max(...ask.outline.map((p) => Math.hypot(p.x, p.y)));
-  const held = placedAll(ask.outline, ask.placement);
+  const parts = partsOf(field, ask, (own) => ask.revealMm + ask.reachMm + (ask.maxTurnRad > 0 ? radiusOf(own) * Math.min(ask.maxTurnRad, 1) : 0));
+  const radius = radiusOf(ask.outline);
   const found: { snap: Snap; cost: number }[] = [];
-  const search = grown(boxOf(held), ask.revealMm + ask.reachMm + radius * Math.min(ask.maxTurnRad, 1));
-  const near = field.near(search);
-
-  for (const theirs of near) {
-    for (const own of edgesOf('', held)) {
-      const toFace = turnToFace(own, theirs);
-      // Rounding is no turn: a frame that lies parallel keeps its turn to the last digit.
-      const turn = Math.abs(toFace) < PARALLEL / 10 ? 0 : toFace;
-      if (Math.abs(turn) > Math.max(ask.maxTurnRad, PARALLEL)) continue;
-      for (const { snap, jump } of snapsOnto(theirs, own.number, turn, ask, near)) {
-        const ease = { 'second frame': 0.6, corner: 0.5, along: 0 }[snap.fit] * ask.reachMm;
-        found.push({ snap, cost: jump + 0.25 * radius * Math.abs(turn) - ease });
+  parts.forEach((part, outline) => {
+    for (const theirs of part.near) {
+      for (const own of part.edges) {
+        const toFace = turnToFace(own, theirs);
+        // Rounding is no turn: a frame that lies parallel keeps its turn to the last digit.
+        const turn = Math.abs(toFace) < PARALLEL / 10 ? 0 : toFace;
+        if (Math.abs(turn) > Math.max(ask.maxTurnRad, PARALLEL)) continue;
+        for (const { snap, jump } of snapsOnto(theirs, parts, outline, own.number, turn, ask)) {
+          const ease = { 'second frame': 0.6, corner: 0.5, along: 0, tip: 0 }[snap.fit] * ask.reachMm;
+          found.push({ snap, cost: jump + 0.25 * radius * Math.abs(turn) - ease });
+        }
       }
     }
-  }
+  });
+  return strongestOf(found, field, parts);
+}
+
+/** The nearest snap of a corner that points at a neighbour's corner, the reveal between them; null where none is in reach. */
+export function strongestTip(field: EdgeField, ask: SnapAsk): Snap | null {
+  const parts = partsOf(field, ask, () => ask.revealMm + ask.reachMm);
+  const found: { snap: Snap; cost: number }[] = [];
+  parts.forEach((part, outline) => {
+    for (const own of part.edges) {
+      for (const theirs of part.near) {
+        if (own.tipX * theirs.tipX + own.tipY * theirs.tipY > FACING) continue;
+        const to = { x: theirs.a.x + theirs.tipX * ask.revealMm, y: theirs.a.y + theirs.tipY * ask.revealMm };
+        const jump = Math.hypot(to.x - own.a.x, to.y - own.a.y);
+        if (jump > ask.reachMm) continue;
+        const placement = { ...ask.placement, xMm: ask.placement.xMm + to.x - own.a.x, yMm: ask.placement.yMm + to.y - own.a.y };
+        found.push({
+          cost: jump,
+          snap: { placement, fit: 'tip', outline, edge: own.number, frameId: theirs.frameId, neighbourEdge: theirs.number, distanceMm: jump, turnedRad: 0, guide: { from: theirs.a, to } },
+        });
+      }
+    }
+  });
+  return strongestOf(found, field, parts);
+}
+
+function strongestOf(found: { snap: Snap; cost: number }[], field: EdgeField, parts: readonly Part[]): Snap | null {
   found.sort((p, q) => p.cost - q.cost);
-  return found.find(({ snap }) => isClear(field, ask, snap.placement))?.snap ?? null;
+  return found.slice(0, mostTried).find(({ snap }) => isClear(field, parts.map((p) => p.outline), snap.placement))?.snap ?? null;
 }
 
 /** Turn, within half a circle either way, after which an edge runs opposite to the neighbour's. */
@@ -128,9 +191,10 @@ function turnToFace(own: Edge, theirs: Edge): number {
   return Math.atan2(cross, dot);
 }
 
-function snapsOnto(theirs: Edge, number: number, turn: number, ask: SnapAsk, near: readonly Edge[]): { snap: Snap; jump: number }[] {
+function snapsOnto(theirs: Edge, parts: readonly Part[], outline: number, number: number, turn: number, ask: SnapAsk): { snap: Snap; jump: number }[] {
   const turnRad = ask.placement.turnRad + turn;
-  const turned = placedAll(ask.outline, { ...ask.placement, turnRad });
+  const part = parts[outline]!;
+  const turned = turn === 0 ? part.held : placedAll(part.outline, { ...ask.placement, turnRad });
   const p = turned[number]!;
   const q = turned[(number + 1) % turned.length]!;
   // Outward from the neighbour: its edge runs counter-clockwise, so outside is on the right.
@@ -146,7 +210,9 @@ function snapsOnto(theirs: Edge, number: number, turn: number, ask: SnapAsk, nea
     { slide: 0, fit: 'along' },
     { slide: -low, fit: 'corner' },
     { slide: theirs.length - high, fit: 'corner' },
-    ...slidesToSecond(turned, away * nx, away * ny, theirs, ask.revealMm, near).map((slide) => ({ slide, fit: 'second frame' as const })),
+    ...parts
+      .flatMap((other) => (other.near.length === 0 ? [] : slidesToSecond(turn === 0 ? other.edges : edgesOf('', placedAll(other.outline, { ...ask.placement, turnRad })), away * nx, away * ny, theirs, ask.revealMm, other.near)))
+      .map((slide) => ({ slide, fit: 'second frame' as const })),
   ];
   const shorter = Math.min(high - low, theirs.length);
   const snaps: { snap: Snap; jump: number }[] = [];
@@ -166,7 +232,7 @@ function snapsOnto(theirs: Edge, number: number, turn: number, ask: SnapAsk, nea
     snaps.push({
       jump,
       snap: {
-        placement, fit, edge: number, frameId: theirs.frameId, neighbourEdge: theirs.number,
+        placement, fit, outline, edge: number, frameId: theirs.frameId, neighbourEdge: theirs.number,
         distanceMm: jump, turnedRad: turn, guide: { from: onGuide(from), to: onGuide(to) },
       },
     });
@@ -175,9 +241,9 @@ function snapsOnto(theirs: Edge, number: number, turn: number, ask: SnapAsk, nea
 }
 
 /** Slides along one neighbour's edge that bring another edge of the frame to the reveal from a second frame. */
-function slidesToSecond(turned: Polygon, dx: number, dy: number, along: Edge, revealMm: number, near: readonly Edge[]): number[] {
+function slidesToSecond(edges: readonly Edge[], dx: number, dy: number, along: Edge, revealMm: number, near: readonly Edge[]): number[] {
   const slides: number[] = [];
-  for (const own of edgesOf('', turned)) {
+  for (const own of edges) {
     for (const second of near) {
       if (second.frameId === along.frameId) continue;
       if (Math.abs(turnToFace(own, second)) > PARALLEL) continue;
@@ -195,7 +261,10 @@ function slidesToSecond(turned: Polygon, dx: number, dy: number, along: Edge, re
   return slides;
 }
 
-function isClear(field: EdgeField, ask: SnapAsk, placement: Placement): boolean {
-  const outline = placedAll(ask.outline, placement);
-  return field.frames(boxOf(outline)).every((n) => overlapDepth(outline, n.outline) <= 1e-6);
+/** Whether outlines, where a placement puts them, lie over no frame that stays. */
+export function isClear(field: EdgeField, outlines: readonly Polygon[], placement: Placement): boolean {
+  return outlines.every((own) => {
+    const outline = placedAll(own, placement);
+    return field.frames(boxOf(outline)).every((n) => overlapDepth(outline, n.outline) <= 1e-6);
+  });
 }

@@ -34,6 +34,7 @@ import { TemplateDialog } from '../features/templates/template-dialog.tsx';
 import { momentOf } from '../lib/dates.ts';
 import { usePageTitle } from '../lib/page-title.ts';
 import { paths } from '../lib/paths.ts';
+import { supposedPxPerMm, useMeasuredPxPerMm } from '../lib/screen-scale.ts';
 import { useMay } from '../lib/session.ts';
 import { useUnits } from '../lib/units.ts';
 
@@ -94,6 +95,7 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
   const save = useEditor((e) => e.save);
   const stored = useEditor((e) => e.stored);
   const scale = useEditor((e) => e.view.scale);
+  const screen = useMeasuredPxPerMm();
   const frameCount = useEditor((e) => e.bench.frames.length);
   const name = useEditor((e) => e.bench.sheet.name);
   const asking = useEditor((e) => e.conflicts.length > 0);
@@ -123,7 +125,7 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
                 label: 'Revision',
                 value: `${layout.letter}, ${layout.changedSinceSigned && layout.state === 'draft' ? 'changed since signed' : layout.state}`,
               },
-              { label: 'Scale on screen', value: scaleWords(scale) },
+              { label: 'Scale on screen', value: scaleWords(scale / (screen ?? supposedPxPerMm)) },
               { label: 'Units', value: units === 'in' ? 'inches' : 'mm' },
               {
                 label: 'Draft',
@@ -178,12 +180,11 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
   );
 }
 
-/** How many times smaller than life the wall is drawn, at the 96 px that CSS calls an inch. */
-function scaleWords(pxPerMm: number): string {
-  const times = 96 / 25.4 / pxPerMm;
-  return times >= 1
-    ? `1 : ${times < 10 ? times.toFixed(1) : Math.round(times)}`
-    : `${(1 / times).toFixed(1)} : 1`;
+/** A drawing's size against life, as drawings tell their scale. */
+function scaleWords(size: number): string {
+  const times = 1 / size;
+  if (times >= 1) return `1 : ${times < 10 ? times.toFixed(1) : Math.round(times)}`;
+  return `${size.toFixed(1)} : 1`;
 }
 
 const narrowQuery = '(max-width: 767px)';

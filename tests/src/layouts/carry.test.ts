@@ -21,7 +21,7 @@ describe('a frame carried by hand', () => {
   it('lands at the reveal from its neighbour: across flats s√3 and the reveal between centres', () => {
     const b = bench(frame('1', 1000, 1000), frame('2', 2000, 1000));
     const carry = takeUp(b, designs, '2', ['2'], { x: 2010, y: 1005 })!;
-    const { placements, snap } = carried(carry, designs, { x: 1010 + 8, y: 1005 + across + 20 }, how);
+    const { placements, snap } = carried(carry, { x: 1010 + 8, y: 1005 + across + 20 }, how);
     expect(placements.get('2')!.xMm).toBeCloseTo(1000, 6);
     expect(placements.get('2')!.yMm).toBeCloseTo(1000 + across + 6, 6);
     expect(snap?.frameId).toBe('1');
@@ -30,7 +30,7 @@ describe('a frame carried by hand', () => {
   it('goes exactly where the hand does when snapping is off, and takes the others chosen along', () => {
     const b = bench(frame('1', 1000, 1000), frame('2', 2000, 1000), frame('3', 3000, 1000));
     const carry = takeUp(b, designs, '2', ['2', '3'], { x: 2000, y: 1000 })!;
-    const { placements } = carried(carry, designs, { x: 1500, y: 1100 }, { ...how, snapping: false });
+    const { placements } = carried(carry, { x: 1500, y: 1100 }, { ...how, snapping: false });
     expect(placements.get('2')).toMatchObject({ xMm: 1500, yMm: 1100 });
     expect(placements.get('3')).toMatchObject({ xMm: 2500, yMm: 1100 });
   });

@@ -6,6 +6,7 @@ import { FindingsLedger, type ShownFinding } from './ledger/findings-ledger.tsx'
 import { FrameSheet } from './ledger/frame-sheet.tsx';
 import { FramesTable, WholeSizes } from './ledger/frames-table.tsx';
 import { LayoutStage } from './stage/layout-stage.tsx';
+import { MeasureReadout } from './stage/measure-readout.tsx';
 import { StageToolbar } from './stage/stage-toolbar.tsx';
 import type { Designs } from './state/designs.ts';
 import { useEditor } from './state/editor-store.ts';
@@ -36,8 +37,9 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
         ) : null}
         <ConflictNotice />
         <div className={classNames('flex min-h-80 flex-col border border-ink-700 lg:h-auto lg:min-h-[26rem] lg:grow', narrow ? 'h-[52dvh]' : 'h-[72dvh]')}>
-          <StageToolbar wall={wall} readOnly={readOnly} />
+          <StageToolbar wall={wall} designs={designs} readOnly={readOnly} />
           <LayoutStage wall={wall} designs={designs} findings={findings} readOnly={readOnly} />
+          <MeasureReadout />
           <StatusLine readOnly={readOnly} />
           {readOnly ? null : <Tray designs={designs} wall={wall} />}
         </div>
@@ -63,7 +65,7 @@ function StatusLine({ readOnly }: { readOnly: boolean }) {
       </p>
       {readOnly ? null : (
         <p id="wall-keys" className="max-md:hidden">
-          Arrows nudge, with Shift farther. Delete removes. Wheel: nearer and farther. Space and drag: along the wall.
+          Arrows nudge, with Shift farther; Delete removes. Drag over the bare wall to choose several. Ctrl, or ⌘, held while dragging: no snap. Wheel: nearer and farther. Space and drag: along the wall.
         </p>
       )}
     </div>

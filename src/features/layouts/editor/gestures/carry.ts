@@ -1,10 +1,17 @@
 import { distance } from '../../../../../shared/geometry/point.ts';
-import { contains, type Placement, type Point } from '../../../../../shared/geometry/polygon.ts';
+import { contains, moved, type Placement, type Point } from '../../../../../shared/geometry/polygon.ts';
 import type { Bench } from '../../../../../shared/layouts/edits.ts';
 import type { Frame } from '../../../../../shared/layouts/layout.ts';
-import { edgeField, strongestSnap, type EdgeField, type Snap } from '../../../../../shared/layouts/snap.ts';
+import { pictureHeightsMm } from '../../../../../shared/layouts/picture-heights.ts';
+import { edgeField } from '../../../../../shared/layouts/snap.ts';
+import { lineField, type LineNeeds } from '../../../../../shared/layouts/snap-lines.ts';
 import { plainTurnRad, turnStepRad } from '../../../../../shared/layouts/turn.ts';
+import { placedHangers } from '../../../../../shared/patterns/hangers.ts';
 import { type Designs, wallOutline } from '../state/designs.ts';
+import { type Holding, type How, type Settled, settleHold, type Surroundings } from './hold.ts';
+
+/** What of a wall gives lines to lie on. */
+export type CarryWall = LineNeeds['wall'];
 
 /** Most a frame is turned to lie along a neighbour while it is carried. */
 const mostTurnRad = (20 * Math.PI) / 180;
@@ -12,18 +19,18 @@ const mostTurnRad = (20 * Math.PI) / 180;
 export const snapReachPx = 18;
 const turnHoldRad = (4 * Math.PI) / 180;
 
-/** Frames taken up by the hand, and the edges of those that stay. */
+/** Frames taken up by the hand, and all they could lie along. */
 export interface Carry {
-  /** The frame under the hand: the one that snaps. */
+  /** The frame under the hand. */
   leadId: string;
   start: ReadonlyMap<string, Frame>;
   from: Point;
-  field: EdgeField;
+  around: Surroundings;
+  holding: Holding | null;
 }
 
-export interface Carried {
+export interface Carried extends Pick<Settled, 'snap' | 'lines' | 'offered'> {
   placements: ReadonlyMap<string, Placement>;
-  snap: Snap | null;
 }
 
 /** The frame at a point of the wall, the last drawn first; null where there is none. Frames with a hole are taken by their hole too. */
@@ -38,48 +45,56 @@ export function frameAt(frames: readonly Frame[], designs: Designs, at: Point): 
   return null;
 }
 
-/** The edges of all frames but those held. */
-export function fieldWithout(bench: Bench, designs: Designs, held: readonly string[]): EdgeField {
+/** What all frames but those held are to what is held; `wall` gives the lines, where it is known. */
+export function surroundings(bench: Bench, designs: Designs, held: readonly string[], wall: CarryWall | null): Surroundings {
   const out = new Set(held);
-  return edgeField(
-    bench.frames.flatMap((frame) => {
-      const outline = out.has(frame.id) ? null : wallOutline(frame, designs);
-      return outline ? [{ frameId: frame.id, outline }] : [];
-    }),
-  );
+  const staying = bench.frames.filter((f) => !out.has(f.id) && designs.has(f.patternId));
+  return {
+    edges: edgeField(staying.map((frame) => ({ frameId: frame.id, outline: wallOutline(frame, designs)! }))),
+    lines: wall && lineField({ wall, middles: staying.map((f) => ({ frameId: f.id, at: { x: f.xMm, y: f.yMm } })), datumsMm: pictureHeightsMm }),
+  };
 }
 
 /** Takes up frames at a point; null where all of them are locked. */
-export function takeUp(bench: Bench, designs: Designs, leadId: string, ids: readonly string[], from: Point): Carry | null {
-  const held = bench.frames.filter((f) => ids.includes(f.id) && !f.locked);
+export function takeUp(bench: Bench, designs: Designs, leadId: string, ids: readonly string[], from: Point, wall: CarryWall | null = null): Carry | null {
+  const chosen = new Set(ids);
+  const held = bench.frames.filter((f) => chosen.has(f.id) && !f.locked);
   const lead = held.find((f) => f.id === leadId);
   if (!lead) return null;
-  return { leadId, start: new Map(held.map((f) => [f.id, f])), from, field: fieldWithout(bench, designs, held.map((f) => f.id)) };
+  return { leadId, start: new Map(held.map((f) => [f.id, f])), from, around: surroundings(bench, designs, held.map((f) => f.id), wall), holding: holdingOf(lead, held, designs) };
 }
 
-/** Where carried frames are with the hand at `to`. One frame alone may be turned by a snap; several keep their turns. */
-export function carried(carry: Carry, designs: Designs, to: Point, how: { revealMm: number; reachMm: number; snapping: boolean }): Carried {
-  let dx = to.x - carry.from.x;
-  let dy = to.y - carry.from.y;
-  const lead = carry.start.get(carry.leadId)!;
-  const outline = designs.get(lead.patternId)?.outline;
-  const alone = carry.start.size === 1;
-  let turn = 0;
-  let snap: Snap | null = null;
-  if (how.snapping && outline) {
-    const held = { xMm: lead.xMm + dx, yMm: lead.yMm + dy, turnRad: lead.turnRad, flipped: lead.flipped };
-    snap = strongestSnap(carry.field, { outline, placement: held, revealMm: how.revealMm, reachMm: how.reachMm, maxTurnRad: alone ? mostTurnRad : 0 });
-    if (snap) {
-      dx = snap.placement.xMm - lead.xMm;
-      dy = snap.placement.yMm - lead.yMm;
-      turn = snap.turnedRad;
-    }
+/** One frame is held as its pattern gives it, and may be turned; several as they stand on the wall, about the middle of the one under the hand. */
+function holdingOf(lead: Frame, held: readonly Frame[], designs: Designs): Holding | null {
+  const pattern = designs.get(lead.patternId);
+  if (!pattern) return null;
+  const hangers = (f: Frame) => {
+    const design = designs.get(f.patternId)?.design;
+    return design ? placedHangers(f, design).map(({ x, y }) => ({ x: x - lead.xMm, y: y - lead.yMm })) : [];
+  };
+  if (held.length === 1) {
+    return { outline: pattern.outline, body: [], maxTurnRad: mostTurnRad, hangers: placedHangers({ xMm: 0, yMm: 0, turnRad: 0, flipped: false, hangerSlides: lead.hangerSlides }, pattern.design).map(({ x, y }) => ({ x, y })) };
   }
+  const outlineOf = (f: Frame) => moved(wallOutline(f, designs) ?? [], -lead.xMm, -lead.yMm);
+  const others = held.filter((f) => f.id !== lead.id && designs.has(f.patternId));
+  return { outline: outlineOf(lead), body: others.map(outlineOf), hangers: held.flatMap(hangers), maxTurnRad: 0 };
+}
+
+/** Where carried frames are with the hand at `to`. One frame alone may be turned by a snap; several snap as one body and keep their turns. */
+export function carried({ start, leadId, from, around, holding }: Carry, to: Point, how: How): Carried {
+  const lead = start.get(leadId)!;
+  const alone = start.size === 1;
+  const as = alone ? { turnRad: lead.turnRad, flipped: lead.flipped } : { turnRad: 0, flipped: false };
+  const free: Placement = { xMm: lead.xMm + to.x - from.x, yMm: lead.yMm + to.y - from.y, ...as };
+  const { placement, ...why } = holding ? settleHold(around, holding, free, how) : { placement: free, snap: null, lines: [], offered: null };
+  const dx = placement.xMm - lead.xMm;
+  const dy = placement.yMm - lead.yMm;
+  const turn = placement.turnRad - as.turnRad;
   const placements = new Map<string, Placement>();
-  for (const frame of carry.start.values()) {
+  for (const frame of start.values()) {
     placements.set(frame.id, { xMm: frame.xMm + dx, yMm: frame.yMm + dy, turnRad: frame.turnRad + turn, flipped: frame.flipped });
   }
-  return { placements, snap };
+  return { placements, ...why };
 }
 
 /** A frame turned by its handle: it looks to where the hand is, and takes hold at whole steps. */

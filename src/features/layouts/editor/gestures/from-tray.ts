@@ -1,9 +1,11 @@
-import { strongestSnap } from '../../../../../shared/layouts/snap.ts';
+import { placedHangers } from '../../../../../shared/patterns/hangers.ts';
 import { place } from '../operations/operations.ts';
 import type { Designs } from '../state/designs.ts';
-import type { EditorStore } from '../state/editor-store.ts';
+import { type EditorStore, handWith } from '../state/editor-store.ts';
 import { toWall } from '../stage/view.ts';
-import { fieldWithout, snapReachPx } from './carry.ts';
+import { type CarryWall, snapReachPx, surroundings } from './carry.ts';
+import { type Holding, settleHold } from './hold.ts';
+import { snapsNow } from './snap-pause.ts';
 
 const stirPx = 6;
 
@@ -11,10 +13,14 @@ const stirPx = 6;
  * Follows a press on a pattern of the tray: carried over the wall it snaps as a frame does, and is placed where it is
  * let go. Let go elsewhere, or with Escape, nothing is placed.
  */
-export function carryFromTray(pressed: PointerEvent, patternId: string, { store, designs, newId }: { store: EditorStore; designs: Designs; newId: () => string }): void {
+export function carryFromTray(pressed: PointerEvent, patternId: string, { store, designs, wall, newId }: { store: EditorStore; designs: Designs; wall: CarryWall; newId: () => string }): void {
   const pattern = designs.get(patternId);
   if (!pattern || pressed.button !== 0) return;
-  const field = fieldWithout(store.getState().bench, designs, []);
+  const around = surroundings(store.getState().bench, designs, [], wall);
+  const holding: Holding = {
+    outline: pattern.outline, body: [], maxTurnRad: (31 * Math.PI) / 180,
+    hangers: placedHangers({ xMm: 0, yMm: 0, turnRad: 0, flipped: false }, pattern.design),
+  };
   let stirred = false;
 
   function move(event: PointerEvent): void {
@@ -25,14 +31,13 @@ export function carryFromTray(pressed: PointerEvent, patternId: string, { store,
     const box = stage?.getBoundingClientRect();
     const over = box && event.clientX >= box.left && event.clientX <= box.right && event.clientY >= box.top && event.clientY <= box.bottom;
     if (!box || !over) {
-      store.setState({ hand: { placements: new Map(), fromTray: { patternId, at: null }, snap: null } });
+      store.setState({ hand: handWith(new Map(), { patternId, at: null }) });
       return;
     }
     const point = toWall(view, { x: event.clientX - box.left, y: event.clientY - box.top });
     const held = { xMm: point.x, yMm: point.y, turnRad: 0, flipped: false };
-    const ask = { outline: pattern!.outline, placement: held, revealMm: bench.sheet.revealMm, reachMm: snapReachPx / view.scale, maxTurnRad: (31 * Math.PI) / 180 };
-    const snap = snapping ? strongestSnap(field, ask) : null;
-    store.setState({ hand: { placements: new Map(), fromTray: { patternId, at: snap?.placement ?? held }, snap } });
+    const { placement, ...why } = settleHold(around, holding, held, { revealMm: bench.sheet.revealMm, reachMm: snapReachPx / view.scale, snapping: snapsNow(snapping, event) });
+    store.setState({ hand: { placements: new Map(), fromTray: { patternId, at: placement }, ...why } });
   }
 
   function up(event: PointerEvent): void {

@@ -17,7 +17,7 @@ export function nudgeMm(units: 'in' | 'mm', far: boolean): number {
 }
 
 /**
- * The platform's own keys: undo and redo anywhere but in a field; arrows, Delete and Escape on the wall.
+ * The platform's own keys: undo and redo anywhere but in a field; arrows, Delete, Escape and choosing all on the wall.
  * Returns how to stop listening, and whether the space bar is held over the wall.
  */
 export function listenToKeys({ store, units, readOnly }: KeyNeeds): { stop: () => void; spaceHeld: () => boolean } {
@@ -35,6 +35,12 @@ export function listenToKeys({ store, units, readOnly }: KeyNeeds): { stop: () =
     }
     const { stage, selected, bench } = store.getState();
     const onWall = target === null || target === document.body || (stage?.contains(target) ?? false);
+    if (onWall && command && letter === 'a') {
+      event.preventDefault();
+      store.dispatch({ kind: 'select', ids: bench.frames.map((f) => f.id) });
+      store.dispatch({ kind: 'say', words: `All ${bench.frames.length} frames chosen.` });
+      return;
+    }
     if (!onWall || command || event.altKey) return;
     if (event.key === ' ') {
       space = true;
@@ -42,6 +48,10 @@ export function listenToKeys({ store, units, readOnly }: KeyNeeds): { stop: () =
       return;
     }
     if (event.key === 'Escape') {
+      if (store.getState().measuring) {
+        store.setState({ measuring: null });
+        return;
+      }
       store.dispatch({ kind: 'select', ids: [] });
       return;
     }

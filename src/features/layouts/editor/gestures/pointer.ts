@@ -1,14 +1,20 @@
 import { distance, type Point } from '../../../../../shared/geometry/point.ts';
+import { boxOf } from '../../../../../shared/geometry/polygon.ts';
 import type { Frame } from '../../../../../shared/layouts/layout.ts';
+import type { Wall } from '../../../../../shared/walls/wall.ts';
+import { within } from '../operations/arranging.ts';
 import { settle } from '../operations/operations.ts';
-import { type Designs } from '../state/designs.ts';
-import type { EditorStore } from '../state/editor-store.ts';
+import { type Designs, wallOutline } from '../state/designs.ts';
+import { type EditorStore, handWith } from '../state/editor-store.ts';
 import { panned, toScreen, toWall, zoomed } from '../stage/view.ts';
 import { type Carry, carried, frameAt, snapReachPx, takeUp, turnedTo, turnHandle } from './carry.ts';
+import { followMeasure, setMeasure } from './measure.ts';
+import { snapsNow } from './snap-pause.ts';
 
 export interface PointerNeeds {
   store: EditorStore;
   designs: () => Designs;
+  wall: () => Wall;
   readOnly: () => boolean;
   /** Whether the space bar is held: then a drag moves the view. */
   spaceHeld: () => boolean;
@@ -18,6 +24,8 @@ type Doing =
   | { kind: 'pressed'; frame: Frame; at: Point; ids: readonly string[] }
   | { kind: 'carrying'; carry: Carry }
   | { kind: 'turning'; frame: Frame }
+  /** A box drawn over the bare wall; `base` was chosen before, with Shift. */
+  | { kind: 'boxing'; from: Point; base: readonly string[] }
   | { kind: 'panning'; last: Point }
   | { kind: 'pinching'; apart: number; middle: Point };
 
@@ -26,7 +34,7 @@ const stirPx = 4;
 const handlePx = 16;
 
 /** Turns pointer events on the wall into selection, moves, turns and views. Returns how to stop listening. */
-export function listenToPointer(element: HTMLElement, { store, designs, readOnly, spaceHeld }: PointerNeeds): () => void {
+export function listenToPointer(element: HTMLElement, { store, designs, wall, readOnly, spaceHeld }: PointerNeeds): () => void {
   let doing: Doing | null = null;
   const touches = new Map<number, Point>();
 
@@ -38,6 +46,7 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
   const letGo = () => {
     // What is in the hand may have come from the tray: then it is not ours to let go.
     if (doing && store.getState().hand) store.setState({ hand: null });
+    if (store.getState().marquee) store.setState({ marquee: null });
     doing = null;
   };
 
@@ -69,6 +78,10 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
 
   function press(event: PointerEvent, point: Point): void {
     const { bench, selected, view } = store.getState();
+    if (store.getState().measuring) {
+      setMeasure(store, designs(), wall(), onWall(point));
+      return;
+    }
     const turning = readOnly() ? null : handleAt(point);
     if (turning) {
       doing = { kind: 'turning', frame: turning };
@@ -77,7 +90,7 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
     const frame = frameAt(bench.frames, designs(), toWall(view, point));
     if (!frame) {
       if (!event.shiftKey) store.dispatch({ kind: 'select', ids: [] });
-      doing = event.pointerType === 'touch' ? { kind: 'panning', last: point } : null;
+      doing = event.pointerType === 'touch' ? { kind: 'panning', last: point } : { kind: 'boxing', from: point, base: event.shiftKey ? selected : [] };
       return;
     }
     const among = selected.includes(frame.id);
@@ -97,12 +110,16 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
   function move(event: PointerEvent): void {
     const point = at(event);
     if (touches.has(event.pointerId)) touches.set(event.pointerId, point);
-    if (!doing) return;
-    const { bench, view, snapping } = store.getState();
+    if (!doing) {
+      if (store.getState().measuring) followMeasure(store, designs(), wall(), onWall(point));
+      return;
+    }
+    const { bench, view, snapping: snapOn } = store.getState();
+    const snapping = snapsNow(snapOn, event);
     switch (doing.kind) {
       case 'pressed': {
         if (distance(doing.at, point) < stirPx) return;
-        const carry = takeUp(bench, designs(), doing.frame.id, doing.ids, onWall(doing.at));
+        const carry = takeUp(bench, designs(), doing.frame.id, doing.ids, onWall(doing.at), wall());
         if (!carry) {
           store.dispatch({ kind: 'say', words: `Frame ${doing.frame.label} is locked in its place.` });
           doing = null;
@@ -110,6 +127,13 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
         }
         doing = { kind: 'carrying', carry };
         break;
+      }
+      case 'boxing': {
+        if (distance(doing.from, point) < stirPx) return;
+        const marquee = boxOf([onWall(doing.from), onWall(point)]);
+        store.setState({ marquee });
+        store.dispatch({ kind: 'select', ids: [...doing.base, ...within(bench.frames, marquee, (f) => wallOutline(f, designs()))] });
+        return;
       }
       case 'panning':
         store.setState({ view: panned(view, point.x - doing.last.x, point.y - doing.last.y) });
@@ -127,25 +151,26 @@ export function listenToPointer(element: HTMLElement, { store, designs, readOnly
       }
       case 'turning': {
         const placement = turnedTo(doing.frame, designs(), onWall(point), snapping);
-        store.setState({ hand: { placements: new Map([[doing.frame.id, placement]]), fromTray: null, snap: null } });
+        store.setState({ hand: handWith(new Map([[doing.frame.id, placement]])) });
         return;
       }
       case 'carrying':
         break;
     }
     if (doing.kind !== 'carrying') return;
-    const now = carried(doing.carry, designs(), onWall(point), { revealMm: bench.sheet.revealMm, reachMm: snapReachPx / view.scale, snapping });
+    const now = carried(doing.carry, onWall(point), { revealMm: bench.sheet.revealMm, reachMm: snapReachPx / view.scale, snapping });
     store.setState({ hand: { ...now, fromTray: null } });
   }
 
   function up(event: PointerEvent): void {
     touches.delete(event.pointerId);
-    const { hand, bench } = store.getState();
+    const { hand, bench, marquee, selected } = store.getState();
     if (hand && doing && (doing.kind === 'carrying' || doing.kind === 'turning')) {
       const edits = settle(bench.frames, hand.placements);
       const words = doing.kind === 'turning' ? `Frame ${doing.frame.label} turned` : wordsOfMove(bench.frames, [...hand.placements.keys()]);
       store.act(words, edits);
     }
+    if (doing?.kind === 'boxing' && marquee) store.dispatch({ kind: 'say', words: selected.length === 1 ? '1 frame chosen.' : `${selected.length} frames chosen.` });
     letGo();
   }
 

@@ -5,11 +5,14 @@ import { nextStepRad, turnStepRad } from '../../../../../shared/layouts/turn.ts'
 import { formatAngle } from '../../../../../shared/units/angle.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
 import { Button } from '../../../../components/button.tsx';
+import { SelectField } from '../../../../components/select-field.tsx';
 import { TextField } from '../../../../components/text-field.tsx';
 import { newId } from '../../../../lib/new-id.ts';
+import { ofSamePatterns, swapPattern } from '../operations/arranging.ts';
 import * as operation from '../operations/operations.ts';
 import { type Designs, wallOutline } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
+import { ArrangeSheet } from './arrange-sheet.tsx';
 import { SetAngleField, SetLengthField, SetMassField } from './set-field.tsx';
 
 /** What can be done to the frames chosen, and one frame's exact place. */
@@ -60,6 +63,8 @@ export function FrameSheet({ designs, wall }: { designs: Designs; wall: Wall }) 
           Remove
         </Deed>
       </div>
+      <PatternOf frames={chosen} designs={designs} />
+      {only ? null : <ArrangeSheet frames={chosen} designs={designs} />}
       {only ? null : <HungTogether frames={chosen} />}
       {only ? <OneFrame key={only.id} frame={only} /> : null}
     </section>
@@ -97,6 +102,45 @@ function OneFrame({ frame }: { frame: Frame }) {
         onSet={(contentsKg) => set({ contentsKg }, 'loaded otherwise')}
       />
       {problem ? <p className="col-span-2 text-sm font-semibold text-madder-600">{problem}</p> : null}
+    </div>
+  );
+}
+
+/** The pattern of the frames chosen: swapped in place, or all of it chosen. */
+function PatternOf({ frames, designs }: { frames: readonly Frame[]; designs: Designs }) {
+  const store = useEditorStore();
+  const patternIds = new Set(frames.map((f) => f.patternId));
+  const only = patternIds.size === 1 ? frames[0]!.patternId : '';
+  const ids = frames.map((f) => f.id);
+  const swap = (patternId: string) => {
+    const edits = swapPattern(store.getState().bench.frames, ids, patternId);
+    const words = frames.length === 1 ? `Frame ${frames[0]!.label} is` : `${edits.length} frames are`;
+    if (edits.length > 0) store.act(`${words} now ${designs.get(patternId)?.name ?? 'of another pattern'}`, edits);
+  };
+  const options = [
+    ...(only === '' ? [{ value: '', words: 'Several patterns' }] : designs.has(only) ? [] : [{ value: only, words: 'Not in the book' }]),
+    ...[...designs.values()].filter((d) => !d.archived || patternIds.has(d.id)).map((d) => ({ value: d.id, words: d.name })),
+  ];
+  return (
+    <div className="mt-3 flex items-end gap-2">
+      <SelectField
+        className="min-w-0 grow"
+        label="Pattern"
+        value={only}
+        disabled={frames.every((f) => f.locked)}
+        onChange={(event) => (event.target.value === '' ? undefined : swap(event.target.value))}
+        options={options}
+      />
+      <Button
+        className="shrink-0"
+        onClick={() => {
+          const all = ofSamePatterns(store.getState().bench.frames, ids);
+          store.dispatch({ kind: 'select', ids: all });
+          store.dispatch({ kind: 'say', words: all.length === 1 ? 'It is the only one of its pattern.' : `${all.length} frames chosen.` });
+        }}
+      >
+        Choose all of it
+      </Button>
     </div>
   );
 }

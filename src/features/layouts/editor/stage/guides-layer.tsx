@@ -6,17 +6,19 @@ import { colours } from '../../../../../tailwind.config.ts';
 import { turnHandle } from '../gestures/carry.ts';
 import type { Designs } from '../state/designs.ts';
 import { useEditor } from '../state/editor-store.ts';
-import { write } from './canvas-pen.ts';
+import { paintMarquee, paintMeasure, paintSnap } from './paint-guides.ts';
 import { layerPlace } from './view.ts';
 
 const chalk = colours.chalk[600];
 
-/** What is chosen, the turn handle, and the chalk line of a snap with the reveal it keeps. */
-export function GuidesLayer({ designs, readOnly, lengthText }: { designs: Designs; readOnly: boolean; lengthText: (mm: number) => string }) {
+/** What is chosen, the turn handle, the chalk lines of a snap, the box of a choice and the measure being taken. */
+export function GuidesLayer({ designs, wall, readOnly, lengthText }: { designs: Designs; wall: { widthMm: number; heightMm: number }; readOnly: boolean; lengthText: (mm: number) => string }) {
   const view = useEditor((e) => e.view);
   const hand = useEditor((e) => e.hand);
   const selected = useEditor((e) => e.selected);
   const frames = useEditor((e) => e.bench.frames);
+  const marquee = useEditor((e) => e.marquee);
+  const measuring = useEditor((e) => e.measuring);
   const reveal = useEditor((e) => e.bench.sheet.revealMm);
   const scene = useCallback(
     ({ _context: context }: Konva.Context, shape: Konva.Shape) => {
@@ -29,24 +31,11 @@ export function GuidesLayer({ designs, readOnly, lengthText }: { designs: Design
         strokeRing(context, placedAll(pattern.outline, at), px);
         if (selected.length === 1 && !readOnly && !frame.locked) paintHandle(context, at, pattern.radiusMm, px);
       }
-      if (!hand?.snap) return;
-      const { from, to } = hand.snap.guide;
-      const dx = to.x - from.x;
-      const dy = to.y - from.y;
-      const length = Math.hypot(dx, dy) || 1;
-      const over = (22 * px) / length;
-      context.strokeStyle = chalk;
-      context.lineWidth = 2 * px;
-      context.setLineDash([6 * px, 3 * px]);
-      context.beginPath();
-      context.moveTo(from.x - dx * over, from.y - dy * over);
-      context.lineTo(to.x + dx * over, to.y + dy * over);
-      context.stroke();
-      context.setLineDash([]);
-      const beside = (24 * px) / length;
-      write(context, lengthText(reveal), to.x + dx * (over + beside), to.y + dy * (over + beside), 13 * px, chalk, colours.plaster[50]);
+      if (hand) paintSnap(context, hand, { wall, px, reveal, lengthText });
+      if (marquee) paintMarquee(context, marquee, px);
+      if (measuring) paintMeasure(context, measuring, px, lengthText);
     },
-    [selected, frames, hand, designs, readOnly, reveal, lengthText],
+    [selected, frames, hand, marquee, measuring, designs, readOnly, reveal, wall, lengthText],
   );
   return (
     <Layer listening={false} {...layerPlace(view)}>

@@ -27,15 +27,19 @@ type Elevation = NonNullable<NonNullable<Wall['photo']>['elevation']>;
 /** The wall's face and its photo: changes when a photo arrives. */
 export function GroundLayer({ wall, picture, image }: { wall: Wall; picture: Elevation | null; image: HTMLImageElement | null }) {
   const ground = useMemo(() => wallDrawing(wall, null).ground, [wall]);
+  const brightness = useEditor((e) => e.show.photo);
   const paint = useCallback(
     (context: CanvasRenderingContext2D, pxPerMm: number) => {
       draw(context, ground, pxPerMm);
       if (picture && image) {
+        // Over the white face of the wall, so that less of it is lighter, never darker.
+        context.globalAlpha = brightness;
         drawPicture(context, image, picture);
+        context.globalAlpha = 1;
         draw(context, ground.slice(-1), pxPerMm);
       }
     },
-    [ground, picture, image],
+    [ground, picture, image, brightness],
   );
   return <WallLayer paint={paint} />;
 }

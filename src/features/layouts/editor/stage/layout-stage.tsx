@@ -28,25 +28,26 @@ export function LayoutStage({ wall, designs, findings, readOnly }: Props) {
   const store = useEditorStore();
   const units = useUnits();
   const element = useRef<HTMLDivElement>(null);
-  const latest = useRef({ designs, readOnly, units });
+  const latest = useRef({ designs, wall, readOnly, units });
   const size = useEditor((e) => e.size);
   const selected = useEditor((e) => e.selected.length);
   const carrying = useEditor((e) => e.hand !== null);
+  const measuring = useEditor((e) => e.measuring !== null);
   const [over, setOver] = useState(false);
   const picture = wall.photo?.elevation ?? null;
   const marked = useMemo(() => weightOfFrames(findings ?? []), [findings]);
   const image = useImage(picture?.url ?? null);
 
   useEffect(() => {
-    latest.current = { designs, readOnly, units };
-  }, [designs, readOnly, units]);
+    latest.current = { designs, wall, readOnly, units };
+  }, [designs, wall, readOnly, units]);
 
   useEffect(() => {
     const stage = element.current;
     if (!stage) return;
     store.setState({ stage });
     const keys = listenToKeys({ store, units: () => latest.current.units, readOnly: () => latest.current.readOnly });
-    const stop = listenToPointer(stage, { store, designs: () => latest.current.designs, readOnly: () => latest.current.readOnly, spaceHeld: keys.spaceHeld });
+    const stop = listenToPointer(stage, { store, designs: () => latest.current.designs, wall: () => latest.current.wall, readOnly: () => latest.current.readOnly, spaceHeld: keys.spaceHeld });
     return () => {
       stop();
       keys.stop();
@@ -81,7 +82,7 @@ export function LayoutStage({ wall, designs, findings, readOnly }: Props) {
       className={classNames(
         'relative min-h-0 grow overflow-hidden bg-plaster-100 select-none focus-visible:outline-offset-[-3px]',
         readOnly ? 'touch-pan-y' : 'touch-none',
-        carrying ? 'cursor-grabbing' : over && selected > 0 && !readOnly ? 'cursor-grab' : 'cursor-default',
+        measuring ? 'cursor-crosshair' : carrying ? 'cursor-grabbing' : over && selected > 0 && !readOnly ? 'cursor-grab' : 'cursor-default',
       )}
     >
       {size.width > 0 ? (
@@ -91,7 +92,7 @@ export function LayoutStage({ wall, designs, findings, readOnly }: Props) {
           <FramesLayer designs={designs} />
           <MarksLayer designs={designs} marked={marked} />
           <HandLayer designs={designs} />
-          <GuidesLayer designs={designs} readOnly={readOnly} lengthText={(mm) => formatLength(mm, units)} />
+          <GuidesLayer designs={designs} wall={wall} readOnly={readOnly} lengthText={(mm) => formatLength(mm, units)} />
         </Stage>
       ) : null}
     </div>

@@ -1,20 +1,26 @@
-import { Maximize, Minus, Plus, Redo2, Undo2 } from 'lucide-react';
-import { useState, type ReactNode } from 'react';
+import { Maximize, Minus, Plus, Redo2, Ruler, ScanSearch, Undo2 } from 'lucide-react';
+import { useState } from 'react';
 import { LayoutSheet } from '../../../../../shared/layouts/layout.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
 import { changeSheet } from '../operations/operations.ts';
 import { SetLengthField } from '../ledger/set-field.tsx';
+import type { Designs } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
+import { zoomToFrames } from './show-frames.ts';
+import { Tool } from './tool.tsx';
+import { TrueSize } from './true-size.tsx';
 import { fitted, zoomed } from './view.ts';
 
 /** The strip over the wall: undo, the reveal, what is shown, and how near. */
-export function StageToolbar({ wall, readOnly }: { wall: Wall; readOnly: boolean }) {
+export function StageToolbar({ wall, designs, readOnly }: { wall: Wall; designs: Designs; readOnly: boolean }) {
   const store = useEditorStore();
   const canUndo = useEditor((e) => e.undo.at(-1)?.words ?? null);
   const canRedo = useEditor((e) => e.redo.at(-1)?.words ?? null);
   const sheet = useEditor((e) => e.bench.sheet);
   const show = useEditor((e) => e.show);
   const snapping = useEditor((e) => e.snapping);
+  const measuring = useEditor((e) => e.measuring !== null);
+  const chosen = useEditor((e) => e.selected.length > 0);
   const [problem, setProblem] = useState<string | undefined>();
 
   const zoom = (factor: number) => {
@@ -46,12 +52,20 @@ export function StageToolbar({ wall, readOnly }: { wall: Wall; readOnly: boolean
       )}
       <Tick label="Studs" checked={show.studs} onChange={(studs) => store.setState({ show: { ...show, studs } })} />
       <Tick label="Hangers" checked={show.hangers} onChange={(hangers) => store.setState({ show: { ...show, hangers } })} />
+      {wall.photo?.elevation ? <PhotoBrightness /> : null}
       <div className="ml-auto flex items-center gap-1">
+        <Tool name="Measure" pressed={measuring} onPress={() => store.setState({ measuring: measuring ? null : { from: null, to: null, done: false } })}>
+          <Ruler aria-hidden="true" className="size-5" />
+        </Tool>
+        <TrueSize />
         <Tool name="Farther" onPress={() => zoom(1 / 1.3)}>
           <Minus aria-hidden="true" className="size-5" />
         </Tool>
         <Tool name="Nearer" onPress={() => zoom(1.3)}>
           <Plus aria-hidden="true" className="size-5" />
+        </Tool>
+        <Tool name={chosen ? 'Zoom to the frames chosen' : 'Zoom to all frames'} onPress={() => zoomToFrames(store, designs)}>
+          <ScanSearch aria-hidden="true" className="size-5" />
         </Tool>
         <Tool name="Whole wall" onPress={() => store.setState(({ size }) => ({ view: fitted(wall, size) }))}>
           <Maximize aria-hidden="true" className="size-5" />
@@ -61,18 +75,25 @@ export function StageToolbar({ wall, readOnly }: { wall: Wall; readOnly: boolean
   );
 }
 
-function Tool({ name, disabled = false, onPress, children }: { name: string; disabled?: boolean; onPress: () => void; children: ReactNode }) {
+/** How bright the photo behind the frames is: turned down, the drawing stands out. */
+function PhotoBrightness() {
+  const store = useEditorStore();
+  const show = useEditor((e) => e.show);
   return (
-    <button
-      type="button"
-      aria-label={name}
-      title={name}
-      aria-disabled={disabled || undefined}
-      onClick={disabled ? undefined : onPress}
-      className="inline-flex size-9 items-center justify-center rounded-sm border border-ink-500 bg-white text-ink-900 hover:border-chalk-600 hover:text-chalk-700 aria-disabled:cursor-not-allowed aria-disabled:opacity-50"
-    >
-      {children}
-    </button>
+    <label className="flex min-h-9 items-center gap-2 text-sm font-semibold text-ink-900">
+      Photo
+      <input
+        type="range"
+        aria-label="Photo brightness"
+        min={0}
+        max={100}
+        step={5}
+        value={Math.round(show.photo * 100)}
+        aria-valuetext={`${Math.round(show.photo * 100)} %`}
+        onChange={(event) => store.setState({ show: { ...show, photo: Number(event.target.value) / 100 } })}
+        className="h-6 w-24 accent-chalk-600"
+      />
+    </label>
   );
 }
 

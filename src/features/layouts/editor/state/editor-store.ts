@@ -1,8 +1,10 @@
 import { createContext, useContext } from 'react';
 import { createStore, useStore, type StoreApi } from 'zustand';
-import type { Placement } from '../../../../../shared/geometry/polygon.ts';
+import type { Box, Placement } from '../../../../../shared/geometry/polygon.ts';
 import type { Edit, Layout } from '../../../../../shared/layouts/layout.ts';
+import type { MeasuredPoint } from '../../../../../shared/layouts/measure.ts';
 import type { Snap } from '../../../../../shared/layouts/snap.ts';
+import type { SnapLine } from '../../../../../shared/layouts/snap-lines.ts';
 import type { SaveState } from '../saver/save-state.ts';
 import { fitted, type View } from '../stage/view.ts';
 import { reduce, startState, type EditorAction, type EditorState } from './editor-state.ts';
@@ -14,7 +16,21 @@ export interface Hand {
   /** A pattern on its way from the tray; null while it is not over the wall. */
   fromTray: { patternId: string; at: Placement | null } | null;
   snap: Snap | null;
+  /** Lines of the wall that what is held lies on. */
+  lines: readonly SnapLine[];
+  /** A snap just out of reach, shown with its distance. */
+  offered: Snap | null;
 }
+
+/** A measure being taken: its first end, and the second, which follows the pointer until it is `done`. */
+export interface Measuring {
+  from: MeasuredPoint | null;
+  to: MeasuredPoint | null;
+  done: boolean;
+}
+
+/** A hand that holds frames by no snap. */
+export const handWith = (placements: Hand['placements'], fromTray: Hand['fromTray'] = null): Hand => ({ placements, fromTray, snap: null, lines: [], offered: null });
 
 /** Everything the editor holds: the draft, and beside it what is only of the moment. */
 export interface Editor extends EditorState {
@@ -22,7 +38,12 @@ export interface Editor extends EditorState {
   size: { width: number; height: number };
   hand: Hand | null;
   save: SaveState;
-  show: { studs: boolean; hangers: boolean };
+  /** What of the wall is drawn; `photo` is the photo's brightness, 0 (gone) to 1 (as taken). */
+  show: { studs: boolean; hangers: boolean; photo: number };
+  /** The box drawn by a drag over the bare wall, on the wall. */
+  marquee: Box | null;
+  /** Null while no measure is being taken. */
+  measuring: Measuring | null;
   /** Whether a held frame snaps to its neighbours. */
   snapping: boolean;
   /** Where the wall is drawn; gestures that begin elsewhere find it here. */
@@ -44,7 +65,9 @@ export function createEditorStore(layout: Layout): EditorStore {
     size: { width: 0, height: 0 },
     hand: null,
     save: { kind: 'saved' },
-    show: { studs: true, hangers: true },
+    show: { studs: true, hangers: true, photo: 1 },
+    marquee: null,
+    measuring: null,
     snapping: true,
     stage: null,
   }));

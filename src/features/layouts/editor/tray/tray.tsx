@@ -43,7 +43,7 @@ export function Tray({ designs, wall }: { designs: Designs; wall: Wall }) {
               <button
                 type="button"
                 aria-describedby="tray-how"
-                onPointerDown={(event) => carryFromTray(event.nativeEvent, pattern.id, { store, designs, newId })}
+                onPointerDown={(event) => carryFromTray(event.nativeEvent, pattern.id, { store, designs, wall, newId })}
                 // A press by mouse or finger is a drag; a click without one comes from keys or from a screen reader, or is a plain press: both place.
                 onClick={() => placeNext(store, designs, pattern, wall)}
                 className="flex w-44 cursor-grab touch-pan-x items-center gap-2 rounded-sm border border-plaster-200 bg-plaster-50 p-2 text-left hover:border-chalk-600"
