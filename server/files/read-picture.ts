@@ -1,4 +1,5 @@
 import { open } from 'node:fs/promises';
+import readExif from 'exif-reader';
 import sharp from 'sharp';
 import { ProblemError } from '../http/problems.ts';
 import type { Ending } from './file-store.ts';
@@ -12,6 +13,8 @@ export interface Picture {
   /** Size once upright, px. */
   widthPx: number;
   heightPx: number;
+  /** Focal length as if on 35 mm film, mm, where the camera wrote it (Exif 2.32, tag 0xA405; nought means unknown). */
+  focal35Mm: number | null;
 }
 
 /**
@@ -30,7 +33,7 @@ export async function readPicture(file: string): Promise<Picture> {
     throw new ProblemError('bad-input', `This picture is only ${width} × ${height} pixels, too small to measure a wall by. Please send the photo as the camera took it.`);
   }
   const turned = (header.orientation ?? 1) >= 5;
-  return { ending, widthPx: turned ? height : width, heightPx: turned ? width : height };
+  return { ending, widthPx: turned ? height : width, heightPx: turned ? width : height, focal35Mm: focal35MmIn(header.exif) };
 }
 
 /**
@@ -55,6 +58,17 @@ export async function writePreview(file: string, place: string): Promise<void> {
 }
 
 const damaged = 'This picture is cut off or damaged, so it cannot be read to its end. Please copy it from the camera again and send it once more.';
+
+/** Whatever an Exif block holds, it never stops a photo: what cannot be read is not known. */
+function focal35MmIn(exif: Buffer | undefined): number | null {
+  if (!exif) return null;
+  try {
+    const told = readExif(exif).Photo?.FocalLengthIn35mmFilm;
+    return typeof told === 'number' && told >= 5 && told <= 300 ? told : null;
+  } catch {
+    return null;
+  }
+}
 
 /** Told by the file's first bytes; its name and declared type are not believed. */
 function pictureKind(head: Buffer): Picture['ending'] {

@@ -1,6 +1,7 @@
 import { In, type DataSource, type EntityManager } from 'typeorm';
 import { PhotoRow, StudRow, WallRow } from '../database/entities/walls.ts';
 import { duplicateKey, errorNumber, inTransaction } from '../database/transaction.ts';
+import { photosRepository } from './photos.repository.ts';
 
 /** A wall with its studs from left to right and the photo in force. */
 export type WallWhole = WallRow & { studs: StudRow[]; photo: PhotoRow | null };
@@ -55,27 +56,7 @@ export function wallsRepository(data: DataSource) {
       }
     },
 
-    /** Puts a photo in force; returns those it took the place of, whose rows are gone. */
-    async setPhoto(shopId: string, wallId: string, photo: PhotoRow | null): Promise<PhotoRow[]> {
-      return inTransaction(data, async (m: EntityManager) => {
-        const wall = await m.findOne(WallRow, { where: { id: wallId, shopId }, lock: { mode: 'pessimistic_write' } });
-        const before = await m.findBy(PhotoRow, { wallId, shopId });
-        if (before.length > 0) await m.delete(PhotoRow, { id: In(before.map((p) => p.id)) });
-        if (wall && photo) await m.insert(PhotoRow, photo);
-        await m.update(WallRow, { id: wallId, shopId }, { photoId: wall && photo ? photo.id : null });
-        return before;
-      });
-    },
-
-    /** Records a straightening; returns the key of the elevation it took the place of, or false where the photo is gone. */
-    async setElevation(photoId: string, values: Pick<PhotoRow, 'marks' | 'elevation' | 'elevationKey' | 'elevationSha256'>): Promise<{ before: string | null } | false> {
-      return inTransaction(data, async (m: EntityManager) => {
-        const photo = await m.findOne(PhotoRow, { where: { id: photoId }, lock: { mode: 'pessimistic_write' } });
-        if (!photo) return false;
-        await m.update(PhotoRow, { id: photoId }, values);
-        return { before: photo.elevationKey };
-      });
-    },
+    ...photosRepository(data),
   };
 }
 export type WallsRepository = ReturnType<typeof wallsRepository>;

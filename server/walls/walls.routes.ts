@@ -12,8 +12,11 @@ export function wallsRoutes(mount: Mount, walls: WallsService): void {
     // Whoever cancels, or leaves, stops the work.
     const gone = new AbortController();
     res.on('close', () => gone.abort());
-    return walls.straighten(who, params.wallId, params.photoId, body.marks, gone.signal);
+    return walls.straighten(who, params.wallId, params.photoId, body, gone.signal);
   });
+  mount.on(wallsApi.progress, ({ who, params }) => walls.progress(who, params.wallId, params.photoId));
+  mount.on(wallsApi.photos, ({ who, params }) => walls.photos(who, params.wallId));
+  mount.on(wallsApi.choosePhoto, ({ who, params }) => walls.choosePhoto(who, params.wallId, params.photoId));
   mount.on(wallsApi.removePhoto, ({ who, params }) => walls.removePhoto(who, params.wallId, params.photoId));
   mount.on(wallsApi.preview, async ({ who, params, res }) => {
     await walls.files.sendTo(res, await walls.previewKey(who, params.wallId, params.photoId), 'image/jpeg');

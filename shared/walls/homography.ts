@@ -1,6 +1,6 @@
 import { Matrix, SingularValueDecomposition, inverse } from 'ml-matrix';
 import type { z } from 'zod';
-import type { Point as PointShape } from './wall.ts';
+import type { Point as PointShape } from './mark.ts';
 
 export type Point = z.infer<typeof PointShape>;
 

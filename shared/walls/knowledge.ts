@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { Mark, Point } from './wall.ts';
+import { Mark, Point } from './mark.ts';
 
 /** Points of the photo (px) along something known to be straight: a door's edge, a skirting, a stretched string. */
 export const StraightEdge = z.array(Point).min(3, 'Mark at least three points along a straight edge.').max(60);

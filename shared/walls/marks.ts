@@ -1,6 +1,6 @@
 import { applyHomography, depthSign, homographyFrom, type Homography, type Point } from './homography.ts';
 import type { z } from 'zod';
-import type { Mark as MarkShape } from './wall.ts';
+import type { Mark as MarkShape } from './mark.ts';
 
 export type Mark = z.infer<typeof MarkShape>;
 

@@ -1,6 +1,8 @@
 import { z } from 'zod';
-import { id, instant } from '../api/endpoint.ts';
+import { id } from '../api/endpoint.ts';
 import { StudSpecies, usualStudSpecies } from '../hardware/stud-species.ts';
+import { Mark, Point } from './mark.ts';
+import { Photo } from './photo.ts';
 
 /** A length on a wall in mm: finite, above zero, below what any wall of this trade reaches. */
 export const wallLengthMm = z.number({ error: 'Please give a length.' }).finite().positive('This length must be more than zero.').max(30_000, 'A wall longer than 30 m must be taken in parts.');
@@ -57,29 +59,7 @@ export const WallShape = z.object({
 });
 export type WallShape = z.infer<typeof WallShape>;
 
-export const Point = z.object({ x: z.number().finite(), y: z.number().finite() });
-
-/** A point marked on the photo (px, upright picture, origin top left) whose place on the wall is known (mm). */
-export const Mark = z.object({ px: Point, mm: Point });
-export type Mark = z.infer<typeof Mark>;
-
-export const Photo = z.object({
-  id,
-  widthPx: z.number().int(),
-  heightPx: z.number().int(),
-  /** Addresses of the upright preview and, once made, of the straightened elevation. */
-  previewUrl: z.string(),
-  marks: z.array(Mark).nullable(),
-  elevation: z
-    .object({
-      url: z.string(),
-      /** Wall rectangle that the picture shows, mm, and its scale. */
-      leftMm: z.number(), bottomMm: z.number(), widthMm: z.number(), heightMm: z.number(), pxPerMm: z.number(),
-    })
-    .nullable(),
-  createdAt: instant,
-});
-export type Photo = z.infer<typeof Photo>;
+export { Mark, Point, Photo };
 
 export const Wall = WallShape.extend({
   id,

@@ -1,5 +1,7 @@
 import { Entity, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
 import type { Mark, Obstruction, Photo, Stud, WallShape, Zone } from '../../../shared/walls/wall.ts';
+import type { FitReport } from '../../../shared/walls/fit-report.ts';
+import type { KnownBeside } from '../../../shared/walls/photo.ts';
 import { Instant, Json, Mm, Ref, Text, Whole } from './columns.ts';
 import { JobRow } from './jobs.ts';
 
@@ -55,5 +57,10 @@ export class PhotoRow {
   @Whole() heightPx: number;
   @Json({ nullable: true }) marks: Mark[] | null;
   @Json({ nullable: true }) elevation: Omit<NonNullable<Photo['elevation']>, 'url'> | null;
+  /** What was known beside the marks at the last straightening, and what it said of itself. */
+  @Json({ nullable: true }) known: KnownBeside | null;
+  @Json({ nullable: true }) fit: FitReport | null;
+  @Mm({ nullable: true }) sharpness: number | null;
+  @Mm({ nullable: true }) focal35Mm: number | null;
   @Instant() createdAt: Date;
 }

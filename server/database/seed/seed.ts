@@ -84,7 +84,7 @@ async function measuredJob(rooms: Rooms, who: Who, sceneName: string, sheet: { t
     const copy = path.join(folder, 'photo.jpg');
     copyFileSync(scene.photo, copy);
     const photo = await rooms.walls.upload(who, wall.id, copy);
-    await rooms.walls.straighten(who, wall.id, photo.id, scene.marks, new AbortController().signal);
+    await rooms.walls.straighten(who, wall.id, photo.id, { marks: scene.marks }, new AbortController().signal);
   } finally {
     rmSync(folder, { recursive: true, force: true });
   }

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { readFile } from 'node:fs/promises';
 import sharp from 'sharp';
 import { elevationToPhoto, type ElevationPlan } from '../../../shared/walls/elevation-plan.ts';
+import { setProgress } from '../progress.ts';
 import { warp, type Pixels } from '../warp.ts';
 
 export interface StraightenInput {
@@ -12,6 +13,8 @@ export interface StraightenInput {
   widthPx: number;
   heightPx: number;
   plan: ElevationPlan;
+  /** Where to tell how far the work has come. */
+  progress?: SharedArrayBuffer;
 }
 
 export interface StraightenResult {
@@ -23,13 +26,19 @@ export interface StraightenResult {
 const bare = [233, 228, 214] as const;
 
 /** Straightens a photo by its plan and writes the elevation, without any metadata. */
-export default async function straighten({ photoFile, elevationFile, widthPx, heightPx, plan }: StraightenInput): Promise<StraightenResult> {
+export default async function straighten({ photoFile, elevationFile, widthPx, heightPx, plan, progress }: StraightenInput): Promise<StraightenResult> {
+  setProgress(progress, 'reading', 0);
   const photo = await uprightPixels(photoFile, widthPx, heightPx, plan);
   const toPhoto = elevationToPhoto(plan);
   const sx = photo.width / widthPx;
   const sy = photo.height / heightPx;
   const scaled = toPhoto.map((v, i) => (i < 3 ? v * sx : i < 6 ? v * sy : v));
-  const picture = warp(photo, scaled, { width: plan.widthPx, height: plan.heightPx }, bare);
+  const { lens } = plan;
+  const picture = warp(photo, scaled, { width: plan.widthPx, height: plan.heightPx }, bare, {
+    lens: lens && { lambda: lens.lambda, centreX: lens.centre.x * sx, centreY: lens.centre.y * sy, radiusX: lens.radiusPx * sx, radiusY: lens.radiusPx * sy },
+    onShare: (share) => setProgress(progress, 'drawing', share),
+  });
+  setProgress(progress, 'writing', 0);
   await sharp(picture.data, { raw: { width: picture.width, height: picture.height, channels: 3 } })
     .jpeg({ quality: 86, chromaSubsampling: '4:2:0' })
     .toFile(elevationFile);

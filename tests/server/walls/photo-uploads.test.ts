@@ -135,14 +135,31 @@ describe('a photo that is taken', () => {
     expect(filesKept().some((f) => readFileSync(path.join(app.dataDir, 'files', f)).equals(original))).toBe(true);
   });
 
-  it('takes the place of the one before, whose files are deleted, and can be taken off', async () => {
-    const first = await send(await aPicture()).expect(201);
-    const second = await send(await aPicture()).expect(201);
-    expect(filesKept()).toHaveLength(2);
-    await browser.get(first.body.previewUrl).expect(404);
-    const wall = await browser.delete(`/api/walls/${wallId}/photos/${second.body.id}`).expect(200);
-    expect(wall.body.photo).toBeNull();
+  it('takes the place of the one before, which stays to be chosen again; taken off, the newest left comes in force', async () => {
+    for (const photo of (await browser.get(`/api/walls/${wallId}/photos`).expect(200)).body as { id: string }[]) await browser.delete(`/api/walls/${wallId}/photos/${photo.id}`).expect(200);
     expect(filesKept()).toEqual([]);
+    const first = await send(await aPicture()).expect(201);
+    app.time.now = new Date(app.time.now.getTime() + 1000);
+    const second = await send(await aPicture()).expect(201);
+    expect(filesKept()).toHaveLength(4);
+    const listed = () => browser.get(`/api/walls/${wallId}/photos`).expect(200).then((r) => (r.body as { id: string; inForce: boolean }[]).map((p) => [p.id, p.inForce]));
+    expect(await listed()).toEqual([[second.body.id, true], [first.body.id, false]]);
+    await browser.get(first.body.previewUrl).expect(200);
+    const chosen = await browser.post(`/api/walls/${wallId}/photos/${first.body.id}/choose`).expect(200);
+    expect(chosen.body.photo.id).toBe(first.body.id);
+    expect((await browser.delete(`/api/walls/${wallId}/photos/${first.body.id}`).expect(200)).body.photo.id).toBe(second.body.id);
+    await browser.get(first.body.previewUrl).expect(404);
+    await browser.post(`/api/walls/${wallId}/photos/${first.body.id}/choose`).expect(404);
+    expect((await browser.delete(`/api/walls/${wallId}/photos/${second.body.id}`).expect(200)).body.photo).toBeNull();
+    expect(filesKept()).toEqual([]);
+  });
+
+  it('is one of twelve at most', async () => {
+    const small = await aPicture({ width: 240, height: 240 });
+    for (let i = 0; i < 12; i++) await send(small).expect(201);
+    expect((await send(small).expect(400)).body.detail).toMatch(/12 photos/);
+    expect(filesKept()).toHaveLength(24);
+    for (const photo of (await browser.get(`/api/walls/${wallId}/photos`).expect(200)).body as { id: string }[]) await browser.delete(`/api/walls/${wallId}/photos/${photo.id}`).expect(200);
   });
 });
 
