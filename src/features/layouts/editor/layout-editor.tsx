@@ -39,7 +39,9 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
         <div className={classNames('flex min-h-80 flex-col border border-ink-700 lg:h-auto lg:min-h-[26rem] lg:grow', narrow ? 'h-[52dvh]' : 'h-[72dvh]')}>
           <StageToolbar wall={wall} designs={designs} readOnly={readOnly} />
           <LayoutStage wall={wall} designs={designs} findings={findings} readOnly={readOnly} />
-          <MeasureReadout />
+          <div className="relative">
+            <MeasureReadout />
+          </div>
           <StatusLine readOnly={readOnly} />
           {readOnly ? null : <Tray designs={designs} wall={wall} />}
         </div>
@@ -54,19 +56,26 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
   );
 }
 
-/** What was done last, read out; and what the keys do. */
+/** What was done last, read out; and what the keys and the mouse do. Of one height always, so that the wall does not jump. */
 function StatusLine({ readOnly }: { readOnly: boolean }) {
   const news = useEditor((e) => e.news);
   return (
-    <div className="flex flex-wrap justify-between gap-x-4 border-t border-plaster-200 bg-white px-3 py-1 text-sm text-ink-700">
-      <p role="status">
+    <div className="flex shrink-0 items-center justify-between gap-x-4 border-t border-plaster-200 bg-white px-3 py-1 text-sm text-ink-700">
+      <p role="status" className="min-h-6 min-w-0 truncate leading-6" title={news.words}>
         {/* The same words twice are news twice. */}
         <span key={news.count}>{news.words}</span>
       </p>
       {readOnly ? null : (
-        <p id="wall-keys" className="max-md:hidden">
-          Arrows nudge, with Shift farther; Delete removes. Drag over the bare wall to choose several. Ctrl, or ⌘, held while dragging: no snap. Wheel: nearer and farther. Space and drag: along the wall.
-        </p>
+        <details className="relative shrink-0 max-md:hidden">
+          <summary className="cursor-pointer leading-6 font-semibold text-chalk-700 underline underline-offset-4">Keys and mouse</summary>
+          <ul id="wall-keys" className="absolute right-0 bottom-full z-10 mb-2 grid w-96 gap-1 border border-ink-700 bg-white p-3 text-ink-900">
+            <li>Arrows nudge what is chosen, with Shift farther; Delete removes it; Ctrl or ⌘ with A chooses all.</li>
+            <li>Drag over the bare wall to choose several; Shift adds to what is chosen.</li>
+            <li>Hold Ctrl (⌘ on a Mac) while dragging to let go of snapping.</li>
+            <li>Wheel or two fingers: nearer and farther. Space and drag: along the wall.</li>
+            <li>Ctrl or ⌘ with Z takes back, with Y or Shift and Z makes again.</li>
+          </ul>
+        </details>
       )}
     </div>
   );

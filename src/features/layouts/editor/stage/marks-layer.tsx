@@ -10,7 +10,7 @@ const inks = { stop: colours.madder[600], caution: colours.ochre[600], note: col
 /** Size of a mark on screen, px, and how far over the middle of its frame it stands, clear of the label. */
 const markPx = 17;
 const overPx = 19;
-const roomyPx = 34;
+const roomyPx = 22;
 /** The shapes are drawn in a square of this side. */
 const shapeSide = 20;
 
@@ -41,8 +41,9 @@ export function MarksLayer({ designs, marked }: { designs: Designs; marked: Read
 
 function paintMark(context: CanvasRenderingContext2D, weight: FindingWeight, at: Pick<Placement, 'xMm' | 'yMm'>, pxPerMm: number, radiusPx: number): void {
   // A small frame has room for one thing: the mark stands where its label would.
-  const over = radiusPx > roomyPx ? overPx : 0;
-  const size = Math.min(markPx, Math.max(7, radiusPx * 0.8));
+  const roomy = radiusPx > roomyPx;
+  const over = roomy ? Math.min(overPx, radiusPx * 0.5) : 0;
+  const size = Math.min(markPx, Math.max(7, radiusPx * (roomy ? 0.45 : 0.8)));
   context.save();
   context.translate(at.xMm, at.yMm + over / pxPerMm);
   context.scale(size / shapeSide / pxPerMm, -size / shapeSide / pxPerMm);
