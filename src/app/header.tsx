@@ -16,6 +16,7 @@ export function Header({ me }: { me: Me }) {
   const ways = [
     { to: paths.jobs, words: 'Jobs' },
     { to: paths.patterns, words: 'Pattern book' },
+    ...(may(me.role, 'change patterns') ? [{ to: paths.hardware, words: 'Hardware book' }] : []),
     ...(may(me.role, 'run shop') ? [{ to: paths.team, words: 'Team' }] : []),
     ...(health?.development ? [{ to: paths.mailbox, words: 'Mailbox' }] : []),
   ];

@@ -25,6 +25,7 @@ export const routes: RouteObject[] = [
               { path: routePatterns.measure, lazy: async () => ({ Component: (await import('../pages/measure-page.tsx')).MeasurePage }) },
               { path: routePatterns.layout, lazy: async () => ({ Component: (await import('../pages/layout-page.tsx')).LayoutPage }) },
               { path: routePatterns.patterns, lazy: async () => ({ Component: (await import('../pages/patterns-page.tsx')).PatternsPage }) },
+              { path: routePatterns.hardware, lazy: async () => ({ Component: (await import('../pages/hardware-page.tsx')).HardwarePage }) },
               { path: routePatterns.team, lazy: async () => ({ Component: (await import('../pages/team-page.tsx')).TeamPage }) },
             ],
           },

@@ -14,6 +14,7 @@ export const keys = {
   wall: (wallId: string) => ['walls', wallId] as const,
   layout: (layoutId: string) => ['layouts', layoutId] as const,
   patterns: ['patterns'] as const,
+  hardware: ['hardware'] as const,
   portal: (token: string) => ['portal', token] as const,
   mailbox: ['development', 'mailbox'] as const,
   mail: (mailId: string) => ['development', 'mailbox', mailId] as const,

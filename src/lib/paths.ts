@@ -5,6 +5,7 @@ export const routePatterns = {
   measure: '/jobs/:jobId/walls/:wallId',
   layout: '/jobs/:jobId/layouts/:layoutId',
   patterns: '/patterns',
+  hardware: '/hardware',
   team: '/team',
   signIn: '/sign-in',
   register: '/register',
@@ -19,6 +20,7 @@ export const paths = {
   measure: (jobId: string, wallId: string) => `/jobs/${jobId}/walls/${wallId}`,
   layout: (jobId: string, layoutId: string) => `/jobs/${jobId}/layouts/${layoutId}`,
   patterns: '/patterns',
+  hardware: '/hardware',
   team: '/team',
   /** `back`: where to go once signed in; only addresses of ours, beginning with one slash. */
   signIn: (back?: string) => (back && back !== '/' ? `/sign-in?back=${encodeURIComponent(back)}` : '/sign-in'),

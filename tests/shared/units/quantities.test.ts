@@ -4,6 +4,7 @@ import { boardFeet, netBoardFeet, surfaceMeasure } from '../../../shared/units/b
 import { CUBIC_METRE_PER_BOARD_FOOT, KG_PER_M3_PER_PCF, NEWTON_PER_POUND_FORCE, PASCAL_PER_PSF } from '../../../shared/units/constants.ts';
 import { formatFigure } from '../../../shared/units/figure.ts';
 import { formatLoad, formatMass, parseLoad, parseMass } from '../../../shared/units/mass.ts';
+import { formatStress, parseStress } from '../../../shared/units/stress.ts';
 
 const inch = 25.4;
 const foot = 304.8;
@@ -43,6 +44,16 @@ describe('masses, loads and angles', () => {
     expect(parseLoad('1 kN', 'in')).toEqual({ newton: 1000 });
     expect(parseLoad('50 lb', 'mm')).toEqual({ newton: 50 * NEWTON_PER_POUND_FORCE });
     expect(parseAngle('22,5°')).toEqual({ rad: Math.PI / 8 });
+  });
+
+  it('strengths are read and shown in psi and N/mm²', () => {
+    // NIST SP 811 (2008), appendix B.8, from memory: 1 psi = 6.894757e-3 N/mm².
+    expect(parseStress('1 psi', 'mm')).toEqual({ mpa: expect.closeTo(6.894757e-3, 8) });
+    expect(parseStress('80,000', 'in')).toEqual({ mpa: expect.closeTo(551.5806, 3) });
+    expect(parseStress('80 ksi', 'mm')).toEqual(parseStress('80000 psi', 'mm'));
+    expect(parseStress('550 N/mm²', 'in')).toEqual({ mpa: 550 });
+    for (const bad of ['', 'hard', '80 kg', '1.2.3']) expect(parseStress(bad, 'in')).toHaveProperty('error');
+    expect([formatStress(551.5806, 'in'), formatStress(551.5806, 'mm')]).toEqual(['80,000 psi', '552 N/mm²']);
   });
 
   it('are refused in words', () => {
