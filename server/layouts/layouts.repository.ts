@@ -33,6 +33,9 @@ export function layoutsRepository(data: DataSource) {
     async find(shopId: string, id: string): Promise<LayoutWhole | null> {
       return (await whole(await layouts.findBy({ id, shopId })))[0] ?? null;
     },
+    async version(shopId: string, id: string): Promise<{ version: number; jobId: string } | null> {
+      return layouts.findOne({ where: { id, shopId }, select: { version: true, jobId: true } });
+    },
     async ofJob(shopId: string, jobId: string): Promise<LayoutWhole[]> {
       return whole(await layouts.find({ where: { shopId, jobId }, order: { createdAt: 'ASC', id: 'ASC' } }));
     },

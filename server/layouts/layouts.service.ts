@@ -92,6 +92,13 @@ export function layoutsService({ layouts, jobs, walls, patterns, clock }: Needs)
 
     read: async (who: Who, layoutId: string): Promise<Layout> => told(await wholeFor(who, layoutId)),
 
+    async version(who: Who, layoutId: string): Promise<{ version: number }> {
+      const found = await layouts.version(who.shopId, layoutId);
+      if (!found) throw notFound('layout');
+      await jobs.jobFor(who, found.jobId);
+      return { version: found.version };
+    },
+
     /** Applies edits made on `version`. Any doubt is answered with what stands now; nothing is overwritten in silence. */
     async edit(who: Who, layoutId: string, { version, edits }: BodyOf<typeof layoutsApi.edit>): Promise<Layout> {
       const whole = await wholeFor(who, layoutId);

@@ -13,6 +13,8 @@ export const keys = {
   linksOf: (jobId: string) => ['jobs', jobId, 'links'] as const,
   wall: (wallId: string) => ['walls', wallId] as const,
   layout: (layoutId: string) => ['layouts', layoutId] as const,
+  layoutVersion: (layoutId: string) => ['layout-versions', layoutId] as const,
+  revision: (revisionId: string) => ['revisions', revisionId] as const,
   patterns: ['patterns'] as const,
   hardware: ['hardware'] as const,
   portal: (token: string) => ['portal', token] as const,

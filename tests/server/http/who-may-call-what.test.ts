@@ -47,6 +47,7 @@ const table: Record<string, string> = {
   'get /api/jobs/:jobId/layouts': 'omh',
   'post /api/walls/:wallId/layouts': 'om',
   'get /api/layouts/:layoutId': 'omh',
+  'get /api/layouts/:layoutId/version': 'omh',
   'post /api/layouts/:layoutId/edits': 'om',
   'delete /api/layouts/:layoutId': 'om',
   'post /api/layouts/:layoutId/send': 'om',

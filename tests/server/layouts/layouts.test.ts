@@ -21,6 +21,16 @@ describe('saving a layout', () => {
     expect((await browser.get(`/api/layouts/${layout.id}`)).body.frames[0].xMm).toBe(1000);
   });
 
+  it('tells its version alone, which goes up with every save; of another shop it is not found', async () => {
+    const { layout, frames } = await aLaidOutJob(browser, 1);
+    const frame = frames[0]!;
+    const version = async () => (await browser.get(`/api/layouts/${layout.id}/version`).expect(200)).body;
+    expect(await version()).toEqual({ version: layout.version });
+    await browser.post(`/api/layouts/${layout.id}/edits`).send({ version: layout.version, edits: [{ kind: 'frame', frameId: frame.id, before: frame, after: null }] }).expect(200);
+    expect(await version()).toEqual({ version: layout.version + 1 });
+    await (await aShop(app)).browser.get(`/api/layouts/${layout.id}/version`).expect(404);
+  });
+
   it('lets one of two saves at the same moment through', async () => {
     const { layout, frames } = await aLaidOutJob(browser, 1);
     const frame = frames[0]!;

@@ -1,4 +1,4 @@
-import { useQueryClient } from '@tanstack/react-query';
+import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useEffect, useRef } from 'react';
 import type { Layout } from '../../../../../shared/layouts/layout.ts';
 import { layoutsApi } from '../../../../../shared/layouts/layouts.api.ts';
@@ -6,6 +6,7 @@ import { call } from '../../../../lib/call.ts';
 import { keys } from '../../../../lib/keys.ts';
 import { useMe } from '../../../../lib/session.ts';
 import type { EditorStore } from '../state/editor-store.ts';
+import { layoutVersionQuery } from '../../layouts.queries.ts';
 import { keptEdits } from './kept-edits.ts';
 import { type Saver, startSaver } from './saver.ts';
 
@@ -39,8 +40,16 @@ export function useSaver(store: EditorStore, layout: Layout, readOnly: boolean):
 
   useEffect(() => {
     // A newer version that did not come by an own save is another person's.
-    if (layout.version > store.getState().stored.version && store.getState().save.kind !== 'saving') store.dispatch({ kind: 'stored', layout });
+    const { stored, save } = store.getState();
+    if (layout.version <= stored.version || save.kind === 'saving') return;
+    store.dispatch({ kind: 'stored', layout });
+    store.dispatch({ kind: 'say', words: `${layout.updatedBy} saved: their changes are on the wall.` });
   }, [store, layout]);
+
+  const version = useQuery(layoutVersionQuery(id)).data?.version;
+  useEffect(() => {
+    if (version !== undefined && version > store.getState().stored.version && store.getState().save.kind !== 'saving') void client.invalidateQueries({ queryKey: keys.layout(id), exact: true });
+  }, [client, store, id, version]);
 
   return async () => {
     await saver.current?.flush();
