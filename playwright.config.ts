@@ -16,7 +16,7 @@ export default defineConfig({
   workers: 1,
   retries: 0,
   forbidOnly: true,
-  use: { baseURL, trace: 'retain-on-failure', launchOptions: chromium, viewport: { width: 1440, height: 900 } },
+  use: { baseURL, actionTimeout: 20_000, trace: 'retain-on-failure', launchOptions: chromium, viewport: { width: 1440, height: 900 } },
   webServer: {
     command: 'exec node --import tsx e2e/support/serve.ts',
     url: `${baseURL}/api/health`,
