@@ -11,9 +11,11 @@ import { LeaveGuard } from '../components/leave-guard.tsx';
 import { Loading } from '../components/loading.tsx';
 import { Page } from '../components/page.tsx';
 import { TitleBlock } from '../components/title-block.tsx';
+import { WallDrawing } from '../features/drawing/wall-drawing.tsx';
 import { jobQuery } from '../features/jobs/jobs.queries.ts';
+import { CompareDialog } from '../features/layouts/compare/compare-dialog.tsx';
 import { LayoutEditor } from '../features/layouts/editor/layout-editor.tsx';
-import { useFindings } from '../features/layouts/editor/ledger/use-findings.ts';
+import { useChecks } from '../features/layouts/editor/ledger/use-checks.ts';
 import { savedTime, saveWords } from '../features/layouts/editor/saver/save-state.ts';
 import { useSaver } from '../features/layouts/editor/saver/use-saver.ts';
 import { readyDesigns } from '../features/layouts/editor/state/designs.ts';
@@ -89,9 +91,9 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
   const units = useUnits();
   const designs = useMemo(() => readyDesigns(patterns), [patterns]);
   const book = useQuery(hardwareOfLayoutQuery).data;
-  const findings = useFindings({ wall, patterns, book, changedSinceSigned: layout.changedSinceSigned });
+  const checks = useChecks({ wall, patterns, book, changedSinceSigned: layout.changedSinceSigned });
   const flush = useSaver(store, layout, !mayChange);
-  const [dialog, setDialog] = useState<'send' | 'template' | null>(null);
+  const [dialog, setDialog] = useState<'send' | 'template' | 'compare' | null>(null);
   const save = useEditor((e) => e.save);
   const stored = useEditor((e) => e.stored);
   const scale = useEditor((e) => e.view.scale);
@@ -140,6 +142,7 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
             ]}
             action={
               <div className="flex flex-wrap gap-2">
+                {layout.revisions.length > 0 ? <Button onClick={() => setDialog('compare')}>Compare</Button> : null}
                 <Button onClick={() => setDialog('template')}>Template</Button>
                 {mayChange ? (
                   <Button
@@ -157,7 +160,7 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
         <LayoutEditor
           wall={wall}
           designs={designs}
-          findings={findings}
+          checks={checks}
           readOnly={readOnly}
           narrow={narrow && mayChange}
         />
@@ -167,8 +170,20 @@ function Desk({ layout, job, patterns, wall }: Loaded) {
           layout={layout}
           client={{ name: job.clientName, email: job.clientEmail }}
           frameCount={frameCount}
-          stops={findings?.filter((f) => f.weight === 'stop').length ?? 0}
+          stops={checks?.findings.filter((f) => f.weight === 'stop').length ?? 0}
           readyVersion={readyVersion}
+          onClose={() => setDialog(null)}
+        />
+      ) : null}
+      {dialog === 'compare' ? (
+        <CompareDialog
+          revisions={layout.revisions}
+          bench={{ ...store.getState().bench, patterns }}
+          draw={({ frames, patterns: made, label, over }) => (
+            <WallDrawing wall={wall} elevation={wall.photo?.elevation ?? null} frames={frames} patterns={made} label={label} small className="max-h-[46dvh] w-full bg-plaster-100">
+              {over}
+            </WallDrawing>
+          )}
           onClose={() => setDialog(null)}
         />
       ) : null}

@@ -2,9 +2,12 @@ import type { Wall } from '../../../../shared/walls/wall.ts';
 import { classNames } from '../../../components/class-names.ts';
 import { Notice } from '../../../components/notice.tsx';
 import { ConflictNotice } from './ledger/conflict-notice.tsx';
-import { FindingsLedger, type ShownFinding } from './ledger/findings-ledger.tsx';
+import { FindingsLedger } from './ledger/findings-ledger.tsx';
 import { FrameSheet } from './ledger/frame-sheet.tsx';
 import { FramesTable, WholeSizes } from './ledger/frames-table.tsx';
+import { LoadsLedger } from './ledger/loads-ledger.tsx';
+import { SeekPanel } from './ledger/seek-panel.tsx';
+import type { Checks } from './ledger/use-checks.ts';
 import { LayoutStage } from './stage/layout-stage.tsx';
 import { MeasureReadout } from './stage/measure-readout.tsx';
 import { StageToolbar } from './stage/stage-toolbar.tsx';
@@ -16,15 +19,17 @@ interface Props {
   wall: Wall;
   designs: Designs;
   /** Null while the checks cannot run. */
-  findings: readonly ShownFinding[] | null;
+  checks: Checks | null;
   readOnly: boolean;
   /** The window is too narrow to work in, whatever the reader may do. */
   narrow: boolean;
 }
 
 /** The wall, the tray along its foot and the ledger beside it. Stands inside an EditorContext. */
-export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Props) {
+export function LayoutEditor({ wall, designs, checks, readOnly, narrow }: Props) {
   const save = useEditor((e) => e.save);
+  const seeking = useEditor((e) => e.seeking);
+  const findings = checks?.findings ?? null;
   return (
     <div className="flex flex-col gap-3 lg:min-h-0 lg:grow lg:flex-row">
       <div className="flex min-w-0 grow flex-col gap-3 lg:min-h-0">
@@ -47,8 +52,10 @@ export function LayoutEditor({ wall, designs, findings, readOnly, narrow }: Prop
         </div>
       </div>
       <aside aria-label="Ledger" className="flex shrink-0 flex-col gap-4 lg:w-96 lg:overflow-y-auto lg:pr-1">
+        {seeking && !readOnly ? <SeekPanel checks={checks} /> : null}
         {readOnly ? null : <FrameSheet designs={designs} wall={wall} />}
         <FindingsLedger findings={findings} designs={designs} />
+        <LoadsLedger checks={checks} />
         <FramesTable designs={designs} />
         <WholeSizes designs={designs} wall={wall} readOnly={readOnly} />
       </aside>

@@ -6,7 +6,7 @@ import { colours } from '../../../../../tailwind.config.ts';
 import { turnHandle } from '../gestures/carry.ts';
 import type { Designs } from '../state/designs.ts';
 import { useEditor } from '../state/editor-store.ts';
-import { paintMarquee, paintMeasure, paintSnap } from './paint-guides.ts';
+import { paintGhost, paintMarquee, paintMeasure, paintSnap } from './paint-guides.ts';
 import { layerPlace } from './view.ts';
 
 const chalk = colours.chalk[600];
@@ -19,6 +19,7 @@ export function GuidesLayer({ designs, wall, readOnly, lengthText }: { designs: 
   const frames = useEditor((e) => e.bench.frames);
   const marquee = useEditor((e) => e.marquee);
   const measuring = useEditor((e) => e.measuring);
+  const ghosts = useEditor((e) => e.ghosts);
   const reveal = useEditor((e) => e.bench.sheet.revealMm);
   const scene = useCallback(
     ({ _context: context }: Konva.Context, shape: Konva.Shape) => {
@@ -31,11 +32,12 @@ export function GuidesLayer({ designs, wall, readOnly, lengthText }: { designs: 
         strokeRing(context, placedAll(pattern.outline, at), px);
         if (selected.length === 1 && !readOnly && !frame.locked) paintHandle(context, at, pattern.radiusMm, px);
       }
+      for (const ghost of ghosts) paintGhost(context, ghost, px);
       if (hand) paintSnap(context, hand, { wall, px, reveal, lengthText });
       if (marquee) paintMarquee(context, marquee, px);
       if (measuring) paintMeasure(context, measuring, px, lengthText);
     },
-    [selected, frames, hand, marquee, measuring, designs, readOnly, reveal, wall, lengthText],
+    [selected, frames, hand, ghosts, marquee, measuring, designs, readOnly, reveal, wall, lengthText],
   );
   return (
     <Layer listening={false} {...layerPlace(view)}>

@@ -3,7 +3,7 @@ import { measured } from '../../../../../shared/layouts/measure.ts';
 import type { Snap } from '../../../../../shared/layouts/snap.ts';
 import type { SnapLine } from '../../../../../shared/layouts/snap-lines.ts';
 import { colours } from '../../../../../tailwind.config.ts';
-import type { Hand, Measuring } from '../state/editor-store.ts';
+import type { Ghost, Hand, Measuring } from '../state/editor-store.ts';
 import { write } from './canvas-pen.ts';
 
 const chalk = colours.chalk[600];
@@ -88,4 +88,23 @@ function paintEnd(context: CanvasRenderingContext2D, at: Point, px: number): voi
   context.strokeStyle = chalk;
   context.lineWidth = 1.5 * px;
   context.stroke();
+}
+
+/** A frame as it would stand: a dashed chalk line, its hangers full where they meet a stud and hollow where not. */
+export function paintGhost(context: CanvasRenderingContext2D, { outline, hangers }: Ghost, px: number): void {
+  context.strokeStyle = chalk;
+  context.lineWidth = 1.5 * px;
+  context.setLineDash([6 * px, 4 * px]);
+  context.beginPath();
+  outline.forEach(({ x, y }, i) => (i === 0 ? context.moveTo(x, y) : context.lineTo(x, y)));
+  context.closePath();
+  context.stroke();
+  context.setLineDash([]);
+  for (const { at, held } of hangers) {
+    context.beginPath();
+    context.arc(at.x, at.y, 4.5 * px, 0, 2 * Math.PI);
+    context.fillStyle = held ? chalk : colours.white;
+    context.fill();
+    context.stroke();
+  }
 }

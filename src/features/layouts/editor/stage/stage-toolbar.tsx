@@ -2,6 +2,7 @@ import { Maximize, Minus, Plus, Redo2, Ruler, ScanSearch, Undo2 } from 'lucide-r
 import { useState } from 'react';
 import { LayoutSheet } from '../../../../../shared/layouts/layout.ts';
 import type { Wall } from '../../../../../shared/walls/wall.ts';
+import { Button } from '../../../../components/button.tsx';
 import { changeSheet } from '../operations/operations.ts';
 import { SetLengthField } from '../ledger/set-field.tsx';
 import type { Designs } from '../state/designs.ts';
@@ -19,6 +20,7 @@ export function StageToolbar({ wall, designs, readOnly }: { wall: Wall; designs:
   const sheet = useEditor((e) => e.bench.sheet);
   const show = useEditor((e) => e.show);
   const snapping = useEditor((e) => e.snapping);
+  const seeking = useEditor((e) => e.seeking);
   const measuring = useEditor((e) => e.measuring !== null);
   const chosen = useEditor((e) => e.selected.length > 0);
   const [problem, setProblem] = useState<string | undefined>();
@@ -49,6 +51,11 @@ export function StageToolbar({ wall, designs, readOnly }: { wall: Wall; designs:
           <SetLengthField label="Reveal" inline className="w-44" value={sheet.revealMm} onSet={setReveal} error={problem} />
           <Tick label="Snap" checked={snapping} onChange={(on) => store.setState({ snapping: on })} />
         </>
+      )}
+      {readOnly ? null : (
+        <Button small id="seek-studs" aria-expanded={seeking} onClick={() => store.setState({ seeking: !seeking })}>
+          Seek studs
+        </Button>
       )}
       <Tick label="Studs" checked={show.studs} onChange={(studs) => store.setState({ show: { ...show, studs } })} />
       <Tick label="Hangers" checked={show.hangers} onChange={(hangers) => store.setState({ show: { ...show, hangers } })} />

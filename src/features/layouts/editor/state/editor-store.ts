@@ -1,6 +1,6 @@
 import { createContext, useContext } from 'react';
 import { createStore, useStore, type StoreApi } from 'zustand';
-import type { Box, Placement } from '../../../../../shared/geometry/polygon.ts';
+import type { Box, Placement, Point, Polygon } from '../../../../../shared/geometry/polygon.ts';
 import type { Edit, Layout } from '../../../../../shared/layouts/layout.ts';
 import type { MeasuredPoint } from '../../../../../shared/layouts/measure.ts';
 import type { Snap } from '../../../../../shared/layouts/snap.ts';
@@ -29,6 +29,12 @@ export interface Measuring {
   done: boolean;
 }
 
+/** A frame as it would stand, shown while someone chooses. */
+export interface Ghost {
+  outline: Polygon;
+  hangers: readonly { at: Point; /** In a stud. */ held: boolean }[];
+}
+
 /** A hand that holds frames by no snap. */
 export const handWith = (placements: Hand['placements'], fromTray: Hand['fromTray'] = null): Hand => ({ placements, fromTray, snap: null, lines: [], offered: null });
 
@@ -44,6 +50,9 @@ export interface Editor extends EditorState {
   marquee: Box | null;
   /** Null while no measure is being taken. */
   measuring: Measuring | null;
+  /** Whether studs are being sought, and how the frames would stand by what is chosen there. */
+  seeking: boolean;
+  ghosts: readonly Ghost[];
   /** Whether a held frame snaps to its neighbours. */
   snapping: boolean;
   /** Where the wall is drawn; gestures that begin elsewhere find it here. */
@@ -68,6 +77,8 @@ export function createEditorStore(layout: Layout): EditorStore {
     show: { studs: true, hangers: true, photo: 1 },
     marquee: null,
     measuring: null,
+    seeking: false,
+    ghosts: [],
     snapping: true,
     stage: null,
   }));
