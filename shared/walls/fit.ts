@@ -47,7 +47,7 @@ export function unfittedLens(focal35Mm: number | undefined): number {
  * The camera that agrees best with all that is known of a photo. Four or more marks: normalised direct linear transform,
  * then Levenberg–Marquardt on the distances on the photo, each by its own sureness. Fewer: plumb and level lines with
  * lengths. The lens's term is fitted where there is more than enough to tell it by, and given up where it stays unsure.
- * Returns null where what is known tells no camera. Judge marks with `marksTrouble` first.
+ * Returns null where what is known leaves the camera open. Judge marks with `marksTrouble` first.
  */
 export function fitPhoto(k: Knowledge, photo: { widthPx: number; heightPx: number }, sure: Sureness = usualSureness(photo), lensToo: boolean | 'by itself' = 'by itself'): Fit | null {
   const start = firstCamera(k, photo);
@@ -67,15 +67,16 @@ export function fitPhoto(k: Knowledge, photo: { widthPx: number; heightPx: numbe
 
   const misses = (c: readonly number[]) => observations.flatMap((o) => o.misses(c));
   const plain = solved(misses, camera, [lensAt], unfittedLens(k.focal35Mm));
+  if (!plain) return null;
   const enough = lensToo !== false && (k.marks.length >= 5 || fromEdges > 0);
   let verdict: LensVerdict = { state: 'left out', why: 'too little to tell it by' };
   let best = { ...plain, freedom: brings - needs };
   if (enough && brings - needs >= 1) {
     const bent = solved(misses, plain.camera, [], 0);
     const freedom = brings - needs - 1;
-    const lambda = bent.camera[lensAt]!;
-    const spread = Math.sqrt(bent.covariance[lensAt]![lensAt]!) * (freedom > 0 ? Math.max(1, Math.sqrt(bent.sum / freedom)) : 1);
-    if (lambda > widest.barrel && lambda < widest.pincushion && spread > 0 && (lensToo === true || spread < sureTerm || spread < Math.abs(lambda) / 4)) {
+    const lambda = bent?.camera[lensAt] ?? NaN;
+    const spread = bent ? Math.sqrt(bent.covariance[lensAt]![lensAt]!) * (freedom > 0 ? Math.max(1, Math.sqrt(bent.sum / freedom)) : 1) : NaN;
+    if (bent && lambda > widest.barrel && lambda < widest.pincushion && spread > 0 && (lensToo === true || spread < sureTerm || spread < Math.abs(lambda) / 4)) {
       verdict = { state: 'fitted', lambda, spread };
       withOneTermOnly(bent.covariance, lambda);
       best = { ...bent, freedom };
@@ -95,6 +96,7 @@ function solved(misses: (c: readonly number[]) => number[], from: readonly numbe
   const { parameters, sum, jacobian } = leastSquares(misses, from, held);
   const free = parameters.map((_, i) => i).filter((i) => !held.includes(i));
   const covariance = covarianceOf(jacobian, free, parameters.length);
+  if (!covariance) return null;
   if (held.includes(lensAt)) withUnfittedLens(covariance, jacobian, free, unfitted);
   return { camera: parameters, sum, covariance };
 }

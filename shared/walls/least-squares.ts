@@ -1,4 +1,4 @@
-import { Matrix, pseudoInverse, solve } from 'ml-matrix';
+import { EigenvalueDecomposition, Matrix, solve } from 'ml-matrix';
 
 export interface LeastSquares {
   parameters: number[];
@@ -53,12 +53,23 @@ export function leastSquares(residualsOf: (parameters: readonly number[]) => num
   return { parameters, residuals, sum, jacobian: slopesOf(residualsOf, parameters) };
 }
 
-/** The covariance of the parameters in `free` (others get nought) for residuals of unit variance. */
-export function covarianceOf(jacobian: readonly (readonly number[])[], free: readonly number[], count: number): number[][] {
-  const j = new Matrix(jacobian.map((row) => free.map((i) => row[i] ?? 0)));
-  const inverse = pseudoInverse(j.transpose().mmul(j), 1e-18);
+/** Below this part of the largest, what a set of measures says in some direction is nothing but rounding. */
+const nothing = 1e-11;
+
+/**
+ * The covariance of the parameters in `free` (others get nought) for residuals of unit variance; null where the residuals
+ * leave some direction free. Each parameter is first scaled by what is known of it, so that units do not matter.
+ */
+export function covarianceOf(jacobian: readonly (readonly number[])[], free: readonly number[], count: number): number[][] | null {
+  const sizes = free.map((i) => Math.sqrt(jacobian.reduce((s, row) => s + row[i]! * row[i]!, 0)));
+  if (!sizes.every((v) => Number.isFinite(v) && v > 0)) return null;
+  const j = new Matrix(jacobian.map((row) => free.map((i, a) => row[i]! / sizes[a]!)));
+  const { realEigenvalues: known, eigenvectorMatrix: ways } = new EigenvalueDecomposition(j.transpose().mmul(j), { assumeSymmetric: true });
+  if (Math.min(...known) < nothing * Math.max(...known)) return null;
   const all = Array.from({ length: count }, () => new Array<number>(count).fill(0));
-  free.forEach((i, a) => free.forEach((k, b) => (all[i]![k] = inverse.get(a, b))));
+  free.forEach((i, a) => free.forEach((k, b) => {
+    all[i]![k] = known.reduce((s, v, w) => s + (ways.get(a, w) * ways.get(b, w)) / v, 0) / (sizes[a]! * sizes[b]!);
+  }));
   return all;
 }
 
