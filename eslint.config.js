@@ -1,3 +1,4 @@
+import importX from 'eslint-plugin-import-x';
 import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
 import { importRules } from './.lint/imports.js';
@@ -14,6 +15,13 @@ export default tseslint.config(
       'max-lines': ['error', { max: 400, skipBlankLines: true, skipComments: true }],
       eqeqeq: 'error',
     },
+  },
+  {
+    // No import cycles; imports that are types alone count too.
+    files: ['src/**/*.{ts,tsx}', 'server/**/*.ts', 'shared/**/*.ts'],
+    plugins: { 'import-x': importX },
+    settings: { 'import-x/parsers': { '@typescript-eslint/parser': ['.ts', '.tsx'] }, 'import-x/extensions': ['.ts', '.tsx'] },
+    rules: { 'import-x/no-cycle': 'error' },
   },
   { files: ['src/**/*.{ts,tsx}'], ...reactHooks.configs.flat['recommended-latest'] },
   {
