@@ -24,7 +24,7 @@ export interface PairRule extends Named {
 /** Looks at a pattern that is in use; the engine adds the frames. */
 export interface PatternRule extends Named {
   of: 'pattern';
-  check(pattern: LayoutPattern, around: Surroundings): Omit<Found, 'frameIds'>[];
+  check(pattern: LayoutPattern, around: Omit<Surroundings, 'wall'>): Omit<Found, 'frameIds'>[];
 }
 /** Looks at what hangs as one. */
 export interface BodyRule extends Named {

@@ -20,6 +20,15 @@ export function bevelFigure(frame: FrameGeometry, corner: number): Figure {
   };
 }
 
+/** The same bevel as saws with a scale from the fence read it: 90° less the bevel. */
+export function bevelFromEdgeFigure(frame: FrameGeometry, corner: number): Figure {
+  const { bevelRad } = frame.corners[corner]!;
+  return {
+    label: `Bevel at corner ${corner + 1}, from the board’s length`, value: Math.PI / 2 - bevelRad, unit: 'rad',
+    inputs: [{ label: 'Bevel from square, β', value: bevelRad, unit: 'rad' }], formula: '90° − β', source: `${geometry}: the same cut, read from the other side of a right angle`,
+  };
+}
+
 /** Length of a member over its outer face. */
 export function longPointFigure(frame: FrameGeometry, member: number): Figure {
   const { longPointMm } = frame.members[member]!;
@@ -52,4 +61,27 @@ export function lipFigure(frame: FrameGeometry): Figure | null {
     formula: 'lip = t − w',
     source: geometry,
   };
+}
+
+/** What the groove asks of router and panel; none without a groove. */
+export function grooveFigures(frame: FrameGeometry): Figure[] {
+  const { groove } = frame;
+  if (!groove) return [];
+  const width: FigureInput = { label: 'Width of the groove', value: groove.widthMm, unit: 'mm' };
+  const { count, eachMm, capMm } = groove.passes;
+  return [
+    {
+      label: 'Groove’s share of the thickness', value: groove.shareOfThickness * 100, unit: '%', inputs: [width, { label: 'Thickness', value: frame.thicknessMm, unit: 'mm' }],
+      formula: 'w ÷ t', source: 'Common practice: up to 40 % without a word, never over 50 %',
+    },
+    {
+      label: 'Router passes', value: count, unit: '', inputs: [width, { label: 'Widest pass', value: capMm, unit: 'mm' }, { label: 'Each pass', value: eachMm, unit: 'mm' }],
+      formula: 'width ÷ widest pass, rounded up; all passes alike', source: 'Common practice: 1/8 in of engagement at a pass in hardwood',
+    },
+    { label: 'Panel rests on the shoulder by', value: groove.restMm, unit: 'mm', inputs: [width], formula: 'w − clearance, on each side, when it lies in the middle', source: geometry },
+    {
+      label: 'Depth to spare behind the panels', value: groove.spareDepthMm, unit: 'mm', inputs: [{ label: 'Depth of the groove', value: groove.depthMm, unit: 'mm' }],
+      formula: 'g − mirror − backer', source: geometry,
+    },
+  ];
 }

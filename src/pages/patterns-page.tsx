@@ -10,6 +10,7 @@ import { Loading } from '../components/loading.tsx';
 import { Page } from '../components/page.tsx';
 import { TitleBlock } from '../components/title-block.tsx';
 import { PatternDrawing } from '../features/drawing/pattern-drawing.tsx';
+import { hardwareQuery } from '../features/hardware/hardware.queries.ts';
 import { PatternDialog } from '../features/patterns/pattern-dialog.tsx';
 import { PatternList } from '../features/patterns/pattern-list.tsx';
 import { patternsQuery, useChangePattern } from '../features/patterns/patterns.queries.ts';
@@ -21,6 +22,7 @@ export function PatternsPage() {
   usePageTitle('Pattern book');
   const mayChange = useMay('change patterns');
   const patterns = useQuery(patternsQuery);
+  const book = useQuery({ ...hardwareQuery, enabled: mayChange }).data ?? null;
   const change = useChangePattern();
   const [editing, setEditing] = useState<Pattern | 'new' | null>(null);
   const [archived, setArchived] = useState(false);
@@ -67,6 +69,7 @@ export function PatternsPage() {
         <PatternDialog
           pattern={editing === 'new' ? null : editing}
           draw={(design) => <PatternDrawing design={design} memberNumbers label="Drawing of the pattern" className="aspect-square w-full max-md:max-h-56" />}
+          book={book}
           onClose={() => setEditing(null)}
         />
       ) : null}

@@ -11,6 +11,10 @@ import { Table, Td, Th } from '../../components/table.tsx';
 import { WeightMark } from '../../components/weight-mark.tsx';
 import { useUnits } from '../../lib/units.ts';
 
+const collator = new Intl.Collator(undefined, { numeric: true });
+/** By name as a person counts: #8 before #10. */
+const byName = <Entry extends { name: string }>(entries: readonly Entry[]): Entry[] => [...entries].sort((a, b) => collator.compare(a.name, b.name));
+
 interface Deeds<Entry> {
   /** Null where the reader may not change the book. */
   onChange: ((entry: Entry) => void) | null;
@@ -34,7 +38,7 @@ export function ScrewTable({ screws, ...deeds }: { screws: readonly Screw[] } & 
         </tr>
       </thead>
       <tbody>
-        {screws.map((screw) => (
+        {byName(screws).map((screw) => (
           <tr key={screw.id}>
             <Th scope="row">{screw.name}</Th>
             <Td figure>
@@ -75,7 +79,7 @@ export function BracketTable({ brackets, screws, ...deeds }: { brackets: readonl
         </tr>
       </thead>
       <tbody>
-        {brackets.map((bracket) => {
+        {byName(brackets).map((bracket) => {
           const screw = screws.find((s) => s.id === bracket.frameScrewId);
           return (
             <tr key={bracket.id}>
@@ -113,7 +117,7 @@ export function AnchorTable({ anchors, ...deeds }: { anchors: readonly Anchor[] 
         </tr>
       </thead>
       <tbody>
-        {anchors.map((anchor) => {
+        {byName(anchors).map((anchor) => {
           const allowed = anchorAllowable(anchor);
           const divided = anchor.ratedAs === 'ultimate' ? ` ÷ ${ultimateDivisor}` : '';
           const cell = (rated: number | null, counts: number): ReactNode =>

@@ -1,6 +1,7 @@
 import { type ReactNode, useState } from 'react';
 import { get, useController } from 'react-hook-form';
 import { toast } from 'sonner';
+import type { HardwareBook } from '../../../shared/hardware/hardware-book.ts';
 import { defaultHangers } from '../../../shared/patterns/hangers.ts';
 import { type Pattern, PatternDesign, speciesIds } from '../../../shared/patterns/pattern.ts';
 import { patternsApi } from '../../../shared/patterns/patterns.api.ts';
@@ -16,6 +17,7 @@ import { useSheetForm } from '../../lib/sheet-form.ts';
 import { useUnits } from '../../lib/units.ts';
 import { GrooveFields } from './groove-fields.tsx';
 import { HangerFields } from './hanger-fields.tsx';
+import { hungLike } from './hanger-hardware.tsx';
 import { PatternFacts } from './pattern-facts.tsx';
 import { useAddPattern, useChangePattern } from './patterns.queries.ts';
 import { ShapeFields } from './shape-fields.tsx';
@@ -24,6 +26,8 @@ interface Props {
   /** The pattern to change, or null for a new one. */
   pattern: Pattern | null;
   draw: (design: PatternDesign) => ReactNode;
+  /** The hardware book; null while it is not known. */
+  book: HardwareBook | null;
   onClose: () => void;
 }
 
@@ -36,7 +40,7 @@ const fresh: PatternDesign = { ...bare, hangers: defaultHangers(bare) };
 const thicknesses = { in: [['1/2 in', 12.7], ['5/8 in', 15.875], ['3/4 in', 19.05]], mm: [['12 mm', 12], ['15 mm', 15], ['18 mm', 18]] } as const;
 
 /** Makes a pattern or changes one, with its drawing and its figures beside the fields. */
-export function PatternDialog({ pattern, draw, onClose }: Props) {
+export function PatternDialog({ pattern, draw, book, onClose }: Props) {
   const units = useUnits();
   const add = useAddPattern();
   const change = useChangePattern();
@@ -66,14 +70,16 @@ export function PatternDialog({ pattern, draw, onClose }: Props) {
   const set = (part: Partial<PatternDesign>) => {
     const next = { ...design, ...part };
     const bareNext = PatternDesign.safeParse({ ...next, hangers: [] });
-    if (usual && !part.hangers && bareNext.success) next.hangers = defaultHangers(bareNext.data);
+    if (usual && !part.hangers && bareNext.success) next.hangers = hungLike(defaultHangers(bareNext.data), design.hangers);
     const whole = PatternDesign.safeParse(next);
     if (whole.success) setMade(whole.data);
     field.onChange(next);
     if (formState.submitCount > 0 || formState.touchedFields.design) void sheet.form.trigger('design');
   };
   const setHangers = (hangers: PatternDesign['hangers']) => {
-    setUsual(false);
+    // Only where a hanger sits is set by hand: what it hangs by leaves it following the shape.
+    const moved = JSON.stringify(hungLike(hangers, [])) !== JSON.stringify(hungLike(design.hangers, []));
+    if (moved) setUsual(false);
     set({ hangers });
   };
   const bareNow = PatternDesign.safeParse({ ...design, hangers: [] });
@@ -105,9 +111,10 @@ export function PatternDialog({ pattern, draw, onClose }: Props) {
           <HangerFields
             value={design.hangers}
             onChange={setHangers}
-            onUsual={bareNow.success ? () => setHangers(defaultHangers(bareNow.data)) : null}
+            onUsual={bareNow.success ? () => setHangers(hungLike(defaultHangers(bareNow.data), design.hangers)) : null}
             memberCount={outlineOf(made.shape).length}
             insetMm={made.thicknessMm / 2}
+            book={book}
             errorAt={(path) => errorAt(`hangers.${path}`)}
           />
         </div>
@@ -119,7 +126,7 @@ export function PatternDialog({ pattern, draw, onClose }: Props) {
             </p>
           )}
           <div className="mt-3">
-            <PatternFacts design={made} />
+            <PatternFacts design={made} book={book} />
           </div>
         </div>
       </div>

@@ -77,14 +77,19 @@ export function SeekPanel({ checks }: { checks: Checks | null }) {
             <span className="font-semibold">Today:</span> {scoreWords(found.today, units)}
           </p>
           {found.held ? <p className="mt-1 text-sm font-semibold text-ochre-600">{found.held}</p> : null}
+          {found.best[0] ? (
+            <p className="mt-1 text-sm">
+              <span className="font-semibold">At best:</span> {scoreWords(found.best[0].score, units)}
+            </p>
+          ) : null}
           <fieldset className="mt-2">
-            <legend className="text-sm font-semibold">{choices.length === 1 ? 'What can be done' : 'Best first; those below tie or come after'}</legend>
+            <legend className="text-sm font-semibold">{found.best.length > 1 ? 'These do equally well, the shortest way first' : 'Where to'}</legend>
             {choices.map((c) => (
               <label key={c.key} className={`mt-1 flex cursor-pointer gap-2 border px-2 py-1.5 text-sm ${c === choice ? 'border-chalk-600 bg-chalk-100' : 'border-plaster-200'}`}>
                 <input type="radio" name={title} checked={c === choice} onChange={() => setPicked(c.key)} className="mt-0.5 size-5 shrink-0 accent-chalk-600" />
                 <span>
                   <span className="block font-semibold">{c.words}</span>
-                  <span className="block text-ink-700">{scoreWords(c.of.score, units)}</span>
+                  {c.best ? null : <span className="block text-ink-700">{scoreWords(c.of.score, units)}</span>}
                   {c.range ? <span className="block text-ink-700">{c.range}</span> : null}
                 </span>
               </label>
@@ -140,7 +145,7 @@ function choicesOf(found: ReturnType<typeof seekOnWall>, units: 'in' | 'mm'): Li
   if (!found) return [];
   const listed = found.best.map((of): Listed => {
     const wide = of.range.toMm - of.range.fromMm;
-    return { key: of.shiftMm.toFixed(4), words: shiftWords(of.shiftMm, units), best: true, of, range: wide > 0.1 ? `As good anywhere from ${shiftWords(of.range.fromMm, units).toLowerCase()} to ${shiftWords(of.range.toMm, units).toLowerCase()}.` : null };
+    return { key: of.shiftMm.toFixed(4), words: shiftWords(of.shiftMm, units), best: true, of, range: wide > 0.8 ? `Or up to ${formatLength(wide, units)} farther.` : null };
   });
   const still = found.slidOnly;
   return still && !listed.some((c) => c.of.shiftMm === 0) ? [...listed, { key: 'still', words: shiftWords(0, units), best: false, of: still, range: null }] : listed;

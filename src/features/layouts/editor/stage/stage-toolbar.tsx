@@ -37,7 +37,7 @@ export function StageToolbar({ wall, designs, readOnly }: { wall: Wall; designs:
   };
 
   return (
-    <div role="toolbar" aria-label="The wall" className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-plaster-200 bg-white px-3 py-2">
+    <div role="toolbar" aria-label="The wall" className="flex flex-wrap items-center gap-x-3 gap-y-2 border-b border-plaster-200 bg-white px-3 py-2">
       {readOnly ? null : (
         <>
           <div className="flex gap-1">
@@ -48,7 +48,7 @@ export function StageToolbar({ wall, designs, readOnly }: { wall: Wall; designs:
               <Redo2 aria-hidden="true" className="size-5" />
             </Tool>
           </div>
-          <SetLengthField label="Reveal" inline className="w-44" value={sheet.revealMm} onSet={setReveal} error={problem} />
+          <SetLengthField label="Reveal" inline value={sheet.revealMm} onSet={setReveal} error={problem} />
           <Tick label="Snap" checked={snapping} onChange={(on) => store.setState({ snapping: on })} />
         </>
       )}
