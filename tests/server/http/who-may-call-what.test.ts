@@ -59,6 +59,14 @@ const table: Record<string, string> = {
   'post /api/portal/:token/revisions/:revisionId/sign': 'omhn',
   'post /api/portal/:token/revisions/:revisionId/changes': 'omhn',
   'get /api/layouts/:layoutId/template.pdf': 'omh',
+  'get /api/layouts/:layoutId/template.dxf': 'omh',
+  'get /api/layouts/:layoutId/template.svg': 'omh',
+  'get /api/layouts/:layoutId/template/plan': 'omh',
+  'get /api/layouts/:layoutId/template/progress': 'omh',
+  'get /api/printers': 'omh',
+  'post /api/printers': 'omh',
+  'post /api/printers/:printerId/measurements': 'omh',
+  'delete /api/printers/:printerId': 'omh',
 };
 
 let app: TestApp;
