@@ -28,10 +28,10 @@ export interface Fit {
 }
 
 /**
- * The lens is taken for known when its term is told to this (a tenth of what one sees bend), or to a quarter of itself.
- * A term past `widest` is none that a lens for walls has.
+ * A lens is worth taking out when its term is told much better than by supposing none (to this part of what is supposed),
+ * or when it is four times its own spread. A term past `widest` is none that a lens for walls has.
  */
-const sureTerm = 0.01;
+const sureTerm = 0.4;
 const widest = { barrel: -0.8, pincushion: 0.3 };
 
 /**
@@ -76,7 +76,7 @@ export function fitPhoto(k: Knowledge, photo: { widthPx: number; heightPx: numbe
     const freedom = brings - needs - 1;
     const lambda = bent?.camera[lensAt] ?? NaN;
     const spread = bent ? Math.sqrt(bent.covariance[lensAt]![lensAt]!) * (freedom > 0 ? Math.max(1, Math.sqrt(bent.sum / freedom)) : 1) : NaN;
-    if (bent && lambda > widest.barrel && lambda < widest.pincushion && spread > 0 && (lensToo === true || spread < sureTerm || spread < Math.abs(lambda) / 4)) {
+    if (bent && lambda > widest.barrel && lambda < widest.pincushion && spread > 0 && (lensToo === true || spread < sureTerm * unfittedLens(k.focal35Mm) || spread < Math.abs(lambda) / 4)) {
       verdict = { state: 'fitted', lambda, spread };
       withOneTermOnly(bent.covariance, lambda);
       best = { ...bent, freedom };
