@@ -40,6 +40,9 @@ import { sessionCookies } from './people/sessions.ts';
 import { signoffsRepository } from './signoffs/signoffs.repository.ts';
 import { signoffsRoutes } from './signoffs/signoffs.routes.ts';
 import { signoffsService } from './signoffs/signoffs.service.ts';
+import { printersRepository } from './templates/printers.repository.ts';
+import { printersService } from './templates/printers.service.ts';
+import { createTemplateStore } from './templates/template-store.ts';
 import { templatesRoutes } from './templates/templates.routes.ts';
 import { templatesService } from './templates/templates.service.ts';
 import { wallsRepository } from './walls/walls.repository.ts';
@@ -126,7 +129,7 @@ export function createApp(parts: Parts): { app: Express; mounted: Mounted[]; roo
   wallsRoutes(mount, rooms.walls);
   layoutsRoutes(mount, rooms.layouts);
   signoffsRoutes(mount, rooms.signoffs);
-  templatesRoutes(mount, rooms.templates);
+  templatesRoutes(mount, rooms.templates, rooms.printers);
 
   app.use('/api', nothingHere);
   servePages(app);
@@ -144,12 +147,13 @@ function createRooms({ config, data, outbox, pool, clock, bcryptCost }: Parts) {
   const walls = wallsService({ walls: wallsRepository(data), jobs, files, pool, clock });
   const layouts = layoutsService({ layouts: layoutsRepository(data), jobs, walls, patterns, clock });
   const signoffs = signoffsService({ signoffs: signoffsRepository(data), layouts, jobs, walls, people, files, outbox, origin: config.appOrigin, clock });
-  const templates = templatesService({ layouts, jobs, people, hardware, pool, clock });
+  const printers = printersService(printersRepository(data), clock);
+  const templates = templatesService({ layouts, jobs, people, hardware, printers, store: createTemplateStore(config.dataDir), pool, clock });
   jobs.lookAt({
     wallsOf: (job) => walls.ofJob(job.shopId, job.id),
     layoutsOf: (job) => layouts.ofJob(job.shopId, job.id),
   });
-  return { people, hardware, jobs, patterns, walls, layouts, signoffs, templates };
+  return { people, hardware, jobs, patterns, walls, layouts, signoffs, printers, templates };
 }
 export type Rooms = ReturnType<typeof createRooms>;
 

@@ -5,12 +5,13 @@ import { AssignmentRow, JobRow } from './entities/jobs.ts';
 import { FrameRow, LayoutRow, LinkRow, PatternRow, RevisionRow } from './entities/layouts.ts';
 import { OutboxRow } from './entities/mail.ts';
 import { SessionRow, ShopRow, UserRow } from './entities/people.ts';
+import { PrinterRow } from './entities/printers.ts';
 import { PhotoRow, StudRow, WallRow } from './entities/walls.ts';
 import { migrations } from './migrations/all.ts';
 
 export const entities = [
   ShopRow, UserRow, SessionRow, JobRow, AssignmentRow, WallRow, StudRow, PhotoRow,
-  HardwareRow, PatternRow, LayoutRow, FrameRow, RevisionRow, LinkRow, OutboxRow,
+  HardwareRow, PatternRow, LayoutRow, FrameRow, RevisionRow, LinkRow, OutboxRow, PrinterRow,
 ];
 
 export type Database = DataSource;

@@ -15,7 +15,7 @@ const plain: Record<string, string> = {
 };
 
 /** A stretch of text in one font, or a sign that no font has, to be drawn as an empty box. */
-export type Run = { font: PDFFont; text: string; widthEm: number } | { font: null; widthEm: number };
+export type Run = { font: PDFFont; hex: string; widthEm: number } | { font: null; widthEm: number };
 
 interface Face {
   has: (codePoint: number) => boolean;
@@ -49,7 +49,7 @@ export class TemplateFonts {
     const flush = async () => {
       if (pending === null) return;
       const font = await this.embed(pending.face);
-      runs.push({ font, text: pending.text, widthEm: font.widthOfTextAtSize(pending.text, 1) });
+      runs.push({ font, hex: font.encodeText(pending.text).toString(), widthEm: font.widthOfTextAtSize(pending.text, 1) });
       pending = null;
     };
     for (const sign of [...text.normalize('NFC')].flatMap((s) => [...(plain[s] ?? s)])) {

@@ -1,85 +1,109 @@
-import type { QueryOf } from '../../shared/api/endpoint.ts';
-import { assessBody } from '../../shared/findings/hung-body.ts';
-import { placeFrame } from '../../shared/findings/placed-frame.ts';
-import { usualLimits } from '../../shared/findings/scene.ts';
-import type { HardwareBook } from '../../shared/hardware/hardware-book.ts';
-import { leadHole } from '../../shared/hardware/lead-hole.ts';
-import { studSpecies, type StudSpecies } from '../../shared/hardware/stud-species.ts';
-import type { PatternDesign } from '../../shared/patterns/pattern.ts';
+import { paperProblem } from '../../shared/templates/sheet-format.ts';
+import type { SheetPlan } from '../../shared/templates/sheets.ts';
+import { optionsOf, type TemplateQuery } from '../../shared/templates/template-options.ts';
 import type { TemplateInput } from '../../shared/templates/template-input.ts';
-import type { templatesApi } from '../../shared/templates/templates.api.ts';
+import { planNotes } from '../../shared/templates/template.ts';
 import { isConfirmed } from '../../shared/walls/wall.ts';
 import { ProblemError } from '../http/problems.ts';
 import type { HardwareService } from '../hardware/hardware.service.ts';
 import type { Who } from '../http/who.ts';
 import type { JobsService } from '../jobs/jobs.service.ts';
-import type { Content, LayoutsService } from '../layouts/layouts.service.ts';
+import type { LayoutsService } from '../layouts/layouts.service.ts';
 import type { PeopleService } from '../people/people.service.ts';
 import type { WorkerPool } from '../workers/pool.ts';
+import type { TemplateTask } from '../workers/tasks/template.ts';
+import type { PrintersService } from './printers.service.ts';
+import { pageCell, pagesOf } from './template-progress.ts';
+import { openFindings, templateFrames } from './template-sheets.ts';
+import type { TemplateStore } from './template-store.ts';
 
 interface Needs {
   layouts: LayoutsService;
   jobs: JobsService;
   people: PeopleService;
   hardware: HardwareService;
+  printers: PrintersService;
+  store: TemplateStore;
   pool: WorkerPool;
   clock: () => Date;
 }
 
+
 /** The hanging template: gathers what the sheets need and has them drawn off the request thread. */
-export function templatesService({ layouts, jobs, people, hardware, pool, clock }: Needs) {
+export function templatesService({ layouts, jobs, people, hardware, printers, store, pool, clock }: Needs) {
+  /** Drawings under way in this process, by ticket. */
+  const under = new Map<string, SharedArrayBuffer>();
+
+  async function inputFor(who: Who, layoutId: string, query: TemplateQuery): Promise<TemplateInput> {
+    const { content, told } = await layouts.whole(who, layoutId);
+    if (content.frames.length === 0) throw new ProblemError('bad-input', 'There is no frame on the wall yet, so there is nothing to print.');
+    const [job, shop, book, printer] = await Promise.all([
+      jobs.jobFor(who, told.jobId), people.shopOf(who.shopId), hardware.bookOf(who.shopId), query.printerId ? printers.read(who, query.printerId) : null,
+    ]);
+    const revision = told.state === 'draft' ? undefined : told.revisions.at(-1);
+    const input: TemplateInput = {
+      ...optionsOf(query),
+      title: { shop: shop.name, job: job.title, wall: content.wall.name, layout: told.name, letter: told.letter, state: told.state, sha256: revision?.sha256 ?? null },
+      wall: {
+        widthMm: content.wall.widthMm,
+        heightMm: content.wall.heightMm,
+        studs: content.wall.studs.map((s) => ({ xMm: s.xMm, widthMm: s.widthMm, confirmed: isConfirmed(s), uncertaintyMm: s.uncertaintyMm })),
+      },
+      frames: templateFrames(content, book),
+      units: shop.units,
+      correction: printer ? { x: printer.correctionX, y: printer.correctionY } : { x: query.correctionX, y: query.correctionY },
+      printer: printer?.name ?? '',
+      findings: openFindings(content, book, shop.units, told.changedSinceSigned),
+      drawnAt: `${clock().toISOString().slice(0, 16).replace('T', ' ')} UTC`,
+    };
+    refuse(input);
+    return input;
+  }
+
+  async function plan(who: Who, layoutId: string, query: TemplateQuery, signal: AbortSignal): Promise<{ input: TemplateInput; plan: SheetPlan; notes: string[] }> {
+    const input = await inputFor(who, layoutId, query);
+    const found = await pool.run<TemplateInput, SheetPlan>('template-plan', input, { signal });
+    return { input, plan: found, notes: planNotes(input, found) };
+  }
+
   return {
-    async pdf(who: Who, layoutId: string, { paper, correctionX, correctionY }: QueryOf<typeof templatesApi.pdf>, signal: AbortSignal): Promise<{ bytes: Uint8Array; fileName: string }> {
-      const { content, told } = await layouts.whole(who, layoutId);
-      if (content.frames.length === 0) throw new ProblemError('bad-input', 'There is no frame on the wall yet, so there is nothing to print.');
-      const [job, shop, book] = await Promise.all([jobs.jobFor(who, told.jobId), people.shopOf(who.shopId), hardware.bookOf(who.shopId)]);
-      const revision = told.state === 'draft' ? undefined : told.revisions.at(-1);
-      const input: TemplateInput = {
-        title: { shop: shop.name, job: job.title, wall: content.wall.name, layout: told.name, letter: told.letter, state: told.state, sha256: revision?.sha256 ?? null },
-        wall: {
-          widthMm: content.wall.widthMm,
-          heightMm: content.wall.heightMm,
-          studs: content.wall.studs.map((s) => ({ xMm: s.xMm, widthMm: s.widthMm, confirmed: isConfirmed(s) })),
-        },
-        frames: templateFrames(content, book),
-        units: shop.units,
-        paper,
-        marginMm: 12.7,
-        overlapMm: 12,
-        correction: { x: correctionX, y: correctionY },
-        drawnAt: `${clock().toISOString().slice(0, 16).replace('T', ' ')} UTC`,
-      };
-      const bytes = await pool.run<TemplateInput, Uint8Array>('template', input, { signal });
-      return { bytes, fileName: `template-${told.letter}-${paper}.pdf` };
+    plan,
+
+    /** The file to send, from the store where the same was drawn before. */
+    async file(who: Who, layoutId: string, query: TemplateQuery, output: TemplateTask['output'], signal: AbortSignal, ticket?: string): Promise<{ file: string; fileName: string }> {
+      const input = await inputFor(who, layoutId, query);
+      const cell = pageCell();
+      const name = ticket && `${who.shopId} ${layoutId} ${ticket}`;
+      if (name) under.set(name, cell);
+      try {
+        const { file } = await store.find(who.shopId, store.keyOf(input, output), (place) => pool.run<TemplateTask, void>('template', { input, output, place, cell }, { signal }));
+        return { file, fileName: `template-${input.title.letter}-${input.kind.replace(' ', '-')}-${input.paper}.${output}` };
+      } finally {
+        if (name) under.delete(name);
+      }
     },
+
+    /** How far a drawing has come; idle once it is done, or where none is known by this ticket. */
+    async progress(who: Who, layoutId: string, ticket = ''): Promise<{ state: 'idle' | 'waiting' | 'drawing'; drawn: number; pages: number }> {
+      await layouts.read(who, layoutId);
+      const cell = under.get(`${who.shopId} ${layoutId} ${ticket}`);
+      if (!cell) return { state: 'idle', drawn: 0, pages: 0 };
+      const pages = pagesOf(cell);
+      return { state: pages.pages > 0 ? 'drawing' : 'waiting', ...pages };
+    },
+
+    root: store.root,
   };
 }
 export type TemplatesService = ReturnType<typeof templatesService>;
 
-/** Frames with outline and screws in wall coordinates; a screw is named by its frame's label and a small letter. */
-function templateFrames({ frames, patterns, wall }: Content, book: HardwareBook): TemplateInput['frames'] {
-  const byId = new Map(patterns.map((p) => [p.id, p]));
-  return frames.flatMap((frame) => {
-    const pattern = byId.get(frame.patternId);
-    if (!pattern) return [];
-    const placed = placeFrame(frame, pattern);
-    const { hangers } = assessBody(frame.id, [placed], { wall, book, limits: usualLimits });
-    return [{
-      id: frame.id,
-      label: frame.label,
-      outlineMm: placed.outline,
-      hangers: hangers.map(({ hanger, x, y, meeting }, i) => ({
-        id: hanger.id, label: `${frame.label}${String.fromCharCode(97 + (i % 26))}`, x, y, ...fastener(hanger, meeting?.inStud === true || wall.construction === 'solid wood' ? wall.studSpecies : null, book),
-      })),
-    }];
-  });
-}
-
-/** What is drilled and driven for one hanger: its screw in wood of a species, else its anchor, whose hole its packet states. */
-function fastener(hanger: PatternDesign['hangers'][number], wood: StudSpecies | null, book: HardwareBook): { drillMm: number | null; hardware: string } {
-  const bracket = book.brackets.find((b) => b.id === hanger.bracketId)?.name ?? 'bracket not chosen';
-  const screw = book.screws.find((s) => s.id === hanger.wallScrewId);
-  const anchor = book.anchors.find((a) => a.id === hanger.anchorId);
-  if (wood) return { drillMm: screw ? leadHole(screw, studSpecies[wood]) : null, hardware: `${bracket}; ${screw?.name ?? 'screw not chosen'}` };
-  return { drillMm: null, hardware: `${bracket}; ${anchor ? `${anchor.name}, hole as its packet says` : 'anchor not chosen'}` };
+function refuse(input: TemplateInput): void {
+  const problem = paperProblem(input);
+  if (problem) throw new ProblemError('bad-input', problem.words, { fields: [{ path: problem.path, words: problem.words }] });
+  if (input.kind !== 'full' && input.kind !== 'frames' && input.frames.every((f) => f.hangers.length === 0)) {
+    throw new ProblemError('bad-input', 'No frame has a hanger yet, so there are no screws to print. Give the patterns hangers, or print the full template.', { fields: [{ path: 'kind', words: 'There are no hangers.' }] });
+  }
+  if (input.firstFrameId !== null && !input.frames.some((f) => f.id === input.firstFrameId)) {
+    throw new ProblemError('bad-input', 'The frame to hang first is not on this wall.', { fields: [{ path: 'firstFrameId', words: 'This frame is not on the wall.' }] });
+  }
 }

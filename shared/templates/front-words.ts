@@ -25,15 +25,30 @@ export function proveScale(units: 'in' | 'mm', span: ReturnType<typeof longestSp
   };
 }
 
-export function tapeUp(datums: Datums, units: 'in' | 'mm'): Words {
+export function tapeUp(datums: Datums, { units, join, kind }: Pick<TemplateInput, 'units' | 'join' | 'kind'>): Words {
+  if (kind === 'story stick') return holdStick(datums, units);
+  const lay = join === 'butt' ? 'Cut each sheet along all its lines. Set the cut edges against one another, so that ticks and outlines meet; tape.' : 'Cut each sheet along its left and bottom lines. Lay the cut edge on the dashed line of the sheet it names, so that ticks and outlines meet; tape.';
   return {
     heading: 'Tape up and hang',
     numbered: true,
     paragraphs: [
-      'Cut each sheet along its left and bottom lines. Lay the cut edge on the dashed line of the sheet it names, so that ticks and outlines meet; tape. Let paper lie in the room for an hour first: it grows and shrinks with damp.',
+      `${lay} Let paper lie in the room for an hour first: it grows and shrinks with damp.`,
       `Mark the level datum ${formatLength(datums.levelMm, units)} above the floor and the plumb datum ${formatLength(datums.plumbMm, units)} from the wall’s left edge. Carry both with a level or a laser: floors and corners are seldom true.`,
       'Tape the template to the wall on both datums. A sheet that stands alone is set by the distances on its cut edges.',
       'Prick every cross-hair through the paper, take the paper down, and hang from the bottom up in the order of the next page.',
+    ],
+  };
+}
+
+function holdStick(datums: Datums, units: 'in' | 'mm'): Words {
+  return {
+    heading: 'Make the stick and hang',
+    numbered: true,
+    paragraphs: [
+      'Cut the strips out along their lines, join them from S1 upwards, and tape them to a straight batten. Let paper lie in the room for an hour first: it grows and shrinks with damp.',
+      `Mark the level datum ${formatLength(datums.levelMm, units)} above the floor right across the wall, with a level or a laser: floors are seldom true.`,
+      'Mark each screw’s distance from the left edge, as the next page lists it. Stand the stick plumb at each mark with its level datum on yours, and carry the height over.',
+      'The stick gives heights alone. Check one frame with its own hangers before drilling the rest.',
     ],
   };
 }

@@ -1,7 +1,8 @@
 import type { Point } from '../geometry/point.ts';
+import { distanceBetween } from '../geometry/polygon-distance.ts';
+import { boxOf } from '../geometry/polygon.ts';
 import { MM_PER_INCH } from '../units/constants.ts';
 import { formatLength } from '../units/length.ts';
-
 import type { TemplateFrame, TemplateHanger, TemplateInput } from './template-input.ts';
 
 /** The level line above the floor and the plumb line from the wall's left edge that the whole template is set by, mm. */
@@ -12,18 +13,75 @@ export interface Datums {
 
 /** Heights nearer than this count as one course of frames, mm. */
 const courseMm = 20;
+/** Frames no farther from each other than a wide reveal stand side by side, mm. */
+const touchMm = 20;
 
-/** Frames in the order they are hung: from the lowest course up, each course from the left, so that no frame waits for one below it. */
-export function hangOrder(frames: TemplateFrame[]): TemplateFrame[] {
-  const placed = frames.map((frame) => ({ frame, foot: least(frame.outlineMm, 'y'), left: least(frame.outlineMm, 'x') }));
+interface Placed {
+  frame: TemplateFrame;
+  foot: number;
+  left: number;
+}
+
+/**
+ * Frames in the order they are hung: from the lowest course up, each course from the left, so that no frame waits for one below it. With a chosen
+ * first frame the order grows from there: next is always a frame that touches one already hung, and of those one that no other frame still to be
+ * hung carries, the nearest in height first.
+ */
+export function hangOrder(frames: TemplateFrame[], firstId: string | null = null): TemplateFrame[] {
+  const placed = frames.map((frame): Placed => ({ frame, foot: least(frame.outlineMm, 'y'), left: least(frame.outlineMm, 'x') }));
   placed.sort((a, b) => a.foot - b.foot);
-  const courses: (typeof placed)[] = [];
+  const first = placed.find((one) => one.frame.id === firstId);
+  return first ? grownFrom(first, placed) : byCourses(placed);
+}
+
+function byCourses(placed: Placed[]): TemplateFrame[] {
+  const courses: Placed[][] = [];
   for (const one of placed) {
     const course = courses.at(-1);
     if (course && one.foot - course[0]!.foot <= courseMm) course.push(one);
     else courses.push([one]);
   }
   return courses.flatMap((course) => course.sort((a, b) => a.left - b.left).map((one) => one.frame));
+}
+
+function grownFrom(first: Placed, placed: Placed[]): TemplateFrame[] {
+  const touching = neighbours(placed);
+  const hung = new Set([first]);
+  while (hung.size < placed.length) {
+    let next: Placed | null = null;
+    let least: number[] = [];
+    for (const one of placed) {
+      if (hung.has(one)) continue;
+      const beside = touching.get(one)!;
+      // What lies lower than the first frame cannot carry before its turn comes.
+      const waits = beside.some((b) => !hung.has(b) && b.foot < one.foot - courseMm && b.foot >= first.foot - courseMm);
+      const score = [beside.some((b) => hung.has(b)) ? 0 : 1, waits ? 1 : 0, Math.round(Math.abs(one.foot - first.foot) / courseMm), one.left];
+      if (next === null || comesBefore(score, least)) [next, least] = [one, score];
+    }
+    hung.add(next!);
+  }
+  return [...hung].map((one) => one.frame);
+}
+
+function neighbours(placed: Placed[]): Map<Placed, Placed[]> {
+  const boxes = placed.map((one) => boxOf(one.frame.outlineMm));
+  const near = new Map<Placed, Placed[]>(placed.map((one) => [one, []]));
+  for (const [i, a] of placed.entries()) {
+    for (let k = i + 1; k < placed.length; k += 1) {
+      const b = placed[k]!;
+      const [boxA, boxB] = [boxes[i]!, boxes[k]!];
+      if (boxA.left > boxB.right + touchMm || boxB.left > boxA.right + touchMm || boxA.bottom > boxB.top + touchMm || boxB.bottom > boxA.top + touchMm) continue;
+      if (distanceBetween(a.frame.outlineMm, b.frame.outlineMm) > touchMm) continue;
+      near.get(a)!.push(b);
+      near.get(b)!.push(a);
+    }
+  }
+  return near;
+}
+
+function comesBefore(a: number[], b: number[]): boolean {
+  for (const [i, value] of a.entries()) if (value !== b[i]) return value < b[i]!;
+  return false;
 }
 
 function least(points: Point[], axis: 'x' | 'y'): number {
@@ -79,4 +137,24 @@ export function hardwareCounts(frames: TemplateFrame[]): { hardware: string; cou
   const counts = new Map<string, number>();
   for (const { hardware } of frames.flatMap((f) => f.hangers)) if (hardware !== '') counts.set(hardware, (counts.get(hardware) ?? 0) + 1);
   return [...counts].map(([hardware, count]) => ({ hardware, count })).sort((a, b) => b.count - a.count);
+}
+
+/** What one hanger is hung by, piece by piece: `plate; #8 screw` is a plate and a screw. */
+function piecesOf({ hardware }: TemplateHanger): string[] {
+  return hardware.split(/;\s*/).filter(Boolean);
+}
+
+/** The hardware of each frame as one packs it: frames whose bags are alike stand together. */
+export function hardwareBags(order: TemplateFrame[]): { frames: string[]; pieces: { name: string; count: number }[] }[] {
+  const bags = new Map<string, { frames: string[]; pieces: { name: string; count: number }[] }>();
+  for (const frame of order) {
+    const counts = new Map<string, number>();
+    for (const piece of frame.hangers.flatMap(piecesOf)) counts.set(piece, (counts.get(piece) ?? 0) + 1);
+    const pieces = [...counts].map(([name, count]) => ({ name, count })).sort((a, b) => (a.name < b.name ? -1 : 1));
+    const key = JSON.stringify(pieces);
+    const bag = bags.get(key);
+    if (bag) bag.frames.push(frame.label);
+    else bags.set(key, { frames: [frame.label], pieces });
+  }
+  return [...bags.values()];
 }

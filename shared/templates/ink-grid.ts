@@ -66,6 +66,13 @@ export class InkGrid {
     return { sheets, pastWall, cutScrews: this.cutScrews(origin) };
   }
 
+  /** Rows and columns of the grid between the outermost ink. */
+  spanned({ x, y }: Point): { rows: number; columns: number } {
+    const { bounds, step } = this;
+    const cells = (start: number, size: number, origin: number, pitch: number) => Math.floor((start + size - origin) / pitch - 1e-9) - Math.floor((start - origin) / pitch) + 1;
+    return { rows: cells(bounds.y, bounds.height, y, step.y), columns: cells(bounds.x, bounds.width, x, step.x) };
+  }
+
   private cutScrews(origin: Point): number {
     const reach = this.screwReachMm;
     return this.screws.filter(

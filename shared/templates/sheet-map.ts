@@ -19,7 +19,7 @@ export function sheetMap(input: TemplateInput, plan: SheetPlan, datums: Datums, 
   }
   for (const sheet of plan.sheets) {
     // Each sheet is drawn to where the next one's cut edge comes: what is seen once they are taped.
-    const r = scaled({ ...sheet.window, width: plan.step.x, height: plan.step.y });
+    const r = scaled({ ...sheet.window, width: sheet.step.x, height: sheet.step.y });
     const size = Math.min(3.6, r.height * 0.35, r.width * 0.35);
     items.push(
       rectangle('front', r, { colour: 'grey', widthMm: 0.2 }),

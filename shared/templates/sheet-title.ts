@@ -1,7 +1,7 @@
 import type { Point } from '../geometry/point.ts';
 import { line, text, type Primitive } from './drawing.ts';
 import { barLength, scaleBar } from './scale-bars.ts';
-import { barBandMm, titleBandMm, type SheetFormat } from './sheets.ts';
+import { barBandMm, titleBandMm, type SheetFormat } from './sheet-format.ts';
 import type { TemplateInput } from './template-input.ts';
 import { shorten } from './text-fitting.ts';
 
@@ -17,6 +17,9 @@ export function revisionWords(title: TemplateInput['title']): string {
   return `Revision ${title.letter} · ${signature(title).words}${hash}`;
 }
 
+/** Room at the right of a sheet's title for the key to where it belongs. */
+export const keyMm = { width: 24, height: 11.5 };
+
 /**
  * What stands in the bands of every page: its name, whose template it is, the printing rule and both scale bars. The upper neighbour
  * lies over none of it that the hanger still needs once the sheets are taped.
@@ -27,7 +30,7 @@ export function sheetTitle(input: TemplateInput, format: SheetFormat, name: stri
   const top = live.y + live.height + titleBandMm;
   const nameWidth = isSheet ? 26 : 0;
   const left = live.x + nameWidth;
-  const width = live.width + barBandMm - nameWidth;
+  const width = live.width + barBandMm - nameWidth - (isSheet ? keyMm.width + 2 : 0);
   const heading = [title.shop, title.job, title.wall, title.layout].filter(Boolean).join(' · ');
   const items: Primitive[] = [
     text('title', { x: left, y: top - 3.4 }, shorten(heading, 3.2, width, 'bold'), 3.2, { weight: 'bold', maxWidthMm: width }),
@@ -43,10 +46,14 @@ export function sheetTitle(input: TemplateInput, format: SheetFormat, name: stri
   return [...items, ...bars(input, format)];
 }
 
+/** How long the two bars of a page are, mm: as long as it allows. */
+export function barLengths({ live }: Pick<SheetFormat, 'live'>, { correction, units }: Pick<TemplateInput, 'correction' | 'units'>): { across: number; up: number } {
+  return { across: barLength((live.width - 1) / correction.x, units), up: barLength((live.height - 1) / correction.y, units) };
+}
+
 function bars(input: TemplateInput, format: SheetFormat): Primitive[] {
   const { live } = format;
-  const across = barLength((live.width - 1) / input.correction.x, input.units);
-  const up = barLength((live.height - 1) / input.correction.y, input.units);
+  const { across, up } = barLengths(format, input);
   const foot: Point = { x: live.x + 0.5, y: live.y + live.height + 4 };
   const side: Point = { x: live.x + live.width + barBandMm - 1.5, y: live.y + 0.5 };
   return [
@@ -58,7 +65,7 @@ function bars(input: TemplateInput, format: SheetFormat): Primitive[] {
 
 function correctionNote(input: TemplateInput, foot: Point, across: number): Primitive {
   const figure = (n: number) => n.toFixed(4);
-  const words = `corrected × ${figure(input.correction.x)} across, × ${figure(input.correction.y)} up`;
+  const words = `${input.printer === '' ? 'corrected' : `corrected for ${shorten(input.printer, 2.2, 40)}:`} × ${figure(input.correction.x)} across, × ${figure(input.correction.y)} up`;
   return text('title', { x: foot.x + (across * input.correction.x) / 2, y: foot.y - 3 }, words, 2.2, { colour: 'grey', anchor: 'middle' });
 }
 

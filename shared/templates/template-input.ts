@@ -1,14 +1,11 @@
 import { z } from 'zod';
 import { revisionStates } from '../layouts/layout.ts';
-import { papers } from './papers.ts';
+import { correctionFactor, templateOptions } from './template-options.ts';
 
 const mm = z.number().finite().min(-100_000).max(100_000);
 const sizeMm = z.number().finite().positive().max(100_000);
 const point = z.object({ x: mm, y: mm });
 const words = z.string().max(400);
-
-/** One axis of the printer's correction: stated length of a bar over the length measured on paper. */
-export const correctionFactor = z.number().finite().min(0.9, 'A printer this far out needs mending, not correcting.').max(1.1, 'A printer this far out needs mending, not correcting.');
 
 /** All that the template needs, whole in itself, in wall coordinates (origin lower left, mm, y up). */
 export const TemplateInput = z.object({
@@ -21,7 +18,7 @@ export const TemplateInput = z.object({
   wall: z.object({
     widthMm: sizeMm,
     heightMm: sizeMm,
-    studs: z.array(z.object({ xMm: mm, widthMm: sizeMm, confirmed: z.boolean() })).max(400),
+    studs: z.array(z.object({ xMm: mm, widthMm: sizeMm, confirmed: z.boolean(), uncertaintyMm: z.number().finite().min(0).max(1000).nullable().default(null) })).max(400),
   }),
   frames: z.array(z.object({
     id: z.string(),
@@ -40,12 +37,12 @@ export const TemplateInput = z.object({
     })).max(40),
   })).max(2000),
   units: z.enum(['in', 'mm']),
-  paper: z.enum(papers),
-  /** What the printer leaves blank round the sheet, mm. */
-  marginMm: z.number().finite().min(0).max(40).default(12.7),
-  /** By how much neighbouring sheets overlap at the least, mm. */
-  overlapMm: z.number().finite().min(5).max(60).default(12),
+  ...templateOptions.shape,
   correction: z.object({ x: correctionFactor, y: correctionFactor }).default({ x: 1, y: 1 }),
+  /** What the ledger still says of the layout, the heaviest first. */
+  findings: z.array(z.object({ weight: z.enum(['stop', 'caution', 'note']), words: z.string().max(1000) })).max(400).default([]),
+  /** Whose correction it is; empty where none was chosen. */
+  printer: words.default(''),
   /** When it was drawn, in words for a reader. */
   drawnAt: words,
 });

@@ -1,6 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
 import { useState } from 'react';
-import { type Paper, papers, paperSizes } from '../../../shared/templates/papers.ts';
+import { type Paper, paperName, papers } from '../../../shared/templates/papers.ts';
 import { templatesApi } from '../../../shared/templates/templates.api.ts';
 import { Button } from '../../components/button.tsx';
 import { Actions, Dialog } from '../../components/dialog.tsx';
@@ -34,7 +34,7 @@ export function TemplateDialog({ layout, ready, onClose }: Props) {
           label="Paper"
           value={paper}
           onChange={(event) => setPaper(event.target.value as Paper)}
-          options={papers.map((value) => ({ value, words: paperSizes[value].name }))}
+          options={papers.map((value) => ({ value, words: paperName(value) }))}
         />
         <p className="text-sm text-ink-700">
           Print at actual size (100 %), not fitted to the page. Measure the printed bars before you tape anything, and look for cables and pipes before you drill.

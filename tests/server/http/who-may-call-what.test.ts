@@ -114,9 +114,11 @@ describe('two shops', () => {
     const revisionId = (await browsers.o!.get(`/api/layouts/${mine.layout.id}`)).body.revisions[0].id as string;
     const linkId = (await browsers.o!.get(`/api/jobs/${mine.job.id}/links`)).body[0].id as string;
     const hardwareId = (await browsers.o!.get('/api/hardware')).body.screws[0].id as string;
-    const own: Record<string, string> = { hardwareId, jobId: mine.job.id, wallId: mine.wall.id, layoutId: mine.layout.id, patternId: mine.pattern.id, revisionId, linkId, photoId: randomUUID() };
+    const printerId = (await browsers.o!.post('/api/printers').send({ name: 'Bench printer' }).expect(201)).body.id as string;
+    const own: Record<string, string> = { hardwareId, printerId, jobId: mine.job.id, wallId: mine.wall.id, layoutId: mine.layout.id, patternId: mine.pattern.id, revisionId, linkId, photoId: randomUUID() };
     const bodies: Record<string, object> = {
       'put /api/hardware/:hardwareId': { kind: 'anchor', name: 'Theirs', body: { kind: 'masonry', ratedAs: 'allowable', shearN: null, tensionN: null } },
+      'post /api/printers/:printerId/measurements': { across: { statedMm: 150, measuredMm: 149 }, up: { statedMm: 150, measuredMm: 149 } },
       'patch /api/jobs/:jobId': { version: 1, title: 'Taken over' },
       'post /api/jobs/:jobId/walls': { name: 'w', widthMm: 1000, heightMm: 1000, construction: 'masonry', coveringMm: 0 },
       'patch /api/walls/:wallId': { version: 1, name: 'Taken over' },
@@ -126,7 +128,7 @@ describe('two shops', () => {
       'post /api/layouts/:layoutId/send': { version: 1, note: '' },
       'post /api/walls/:wallId/photos/:photoId/straighten': { marks: [[0, 0], [1, 0], [1, 1], [0, 1]].map(([x, y]) => ({ px: { x: x! * 900, y: y! * 900 }, mm: { x: x! * 900, y: y! * 900 } })) },
     };
-    for (const route of Object.keys(table).filter((r) => /:(job|wall|layout|pattern|revision|link|hardware)Id/.test(r) && !r.includes('portal'))) {
+    for (const route of Object.keys(table).filter((r) => /:(job|wall|layout|pattern|revision|link|hardware|printer)Id/.test(r) && !r.includes('portal'))) {
       const [method, path] = route.split(' ') as ['get', string];
       const address = path.replace(/:([A-Za-z]+)/g, (_, name: string) => own[name] ?? randomUUID());
       const request = theirs.browser[method](address);

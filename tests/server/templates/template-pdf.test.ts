@@ -3,7 +3,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import template from '../../../server/workers/tasks/template.ts';
+import { templateBytes } from '../../../server/workers/tasks/template.ts';
 import type { TemplateInput } from '../../../shared/templates/template-input.ts';
 import { aHexagon, aTemplate } from '../../shared/templates/a-template.ts';
 import { PrintedPage } from '../../support/printed-page.ts';
@@ -18,7 +18,7 @@ afterAll(() => rmSync(folder, { recursive: true, force: true }));
 let count = 0;
 async function print(input: TemplateInput): Promise<string> {
   const file = path.join(folder, `${(count += 1)}.pdf`);
-  writeFileSync(file, await template(input));
+  writeFileSync(file, await templateBytes(input, 'pdf'));
   return file;
 }
 
@@ -92,10 +92,10 @@ describe('a printed template', { timeout: 120_000 }, () => {
 
   it('prints a mark across every sheet, and says why, until it is signed', async () => {
     const one = (state: TemplateInput['title']['state']) => print({ ...aTemplate({ state }), frames: [aHexagon('1', 600, 900, 75)] });
-    const sent = await PrintedPage.read(await one('with client'), 3);
+    const sent = await PrintedPage.read(await one('with client'), 4);
     expect(sent.words).toContain('not signed (with client)');
     expect(sent.paleRedShare()).toBeGreaterThan(0.02);
-    const signed = await PrintedPage.read(await one('signed'), 3);
+    const signed = await PrintedPage.read(await one('signed'), 4);
     expect(signed.words).toContain('Revision B · signed');
     expect(signed.paleRedShare()).toBe(0);
   });

@@ -4,7 +4,7 @@ import type { Point } from '../../../shared/geometry/point.ts';
 import { planSheets, sheetName, type SheetWish } from '../../../shared/templates/sheets.ts';
 
 const wall = { widthMm: 4000, heightMm: 2600 };
-const wish: SheetWish = { paper: 'a4', marginMm: 12.7, overlapMm: 12, correction: { x: 1, y: 1 }, units: 'mm' };
+const wish: SheetWish = { paper: 'a4', marginMm: 12.7, overlapMm: 12, correction: { x: 1, y: 1 }, units: 'mm', join: 'overlap', rollWidthMm: null, longPages: 'split', orientation: 'fewest', origin: null };
 
 function square(x: number, y: number, side: number): Point[] {
   return [{ x, y }, { x: x + side, y }, { x: x + side, y: y + side }, { x, y: y + side }];
