@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { elevationPlanOf, elevationToPhoto } from '../../../shared/walls/elevation-plan.ts';
 import { applyHomography } from '../../../shared/walls/homography.ts';
+import { lensWords } from '../../../shared/walls/lens-words.ts';
 import { distorted, lensMagnification, lensOf, undistorted } from '../../../shared/walls/lens.ts';
 
 const photo = { widthPx: 4000, heightPx: 3000 };
@@ -52,5 +53,15 @@ describe('an elevation by a bent lens', () => {
     const middle = applyHomography(elevationToPhoto(plan), { x: (2000 - plan.leftMm) * plan.pxPerMm, y: (plan.bottomMm + plan.heightMm - 1500) * plan.pxPerMm });
     expect(middle.x).toBeCloseTo(2000, 6);
     expect(middle.y).toBeCloseTo(1500, 6);
+  });
+});
+
+describe('the lens in words', () => {
+  it('is told by which way it bends, or that it bends no more than can be told, or that nobody knows it', () => {
+    const fitted = (cornerPercent: number) => lensWords({ state: 'fitted', lambda: cornerPercent / 100, cornerPercent, spreadPercent: 0.2 });
+    expect(fitted(-8.44)).toMatch(/like a barrel: the corners are out by 8\.4 %, give or take 0\.4/);
+    expect(fitted(3)).toMatch(/like a pincushion/);
+    expect(fitted(0.1)).toMatch(/no more than can be told/);
+    expect(lensWords({ state: 'left out', why: 'too little to tell it by' })).toMatch(/Four marks alone .* mark points along one/);
   });
 });

@@ -53,6 +53,38 @@ describe('four marks on a photo', () => {
   });
 });
 
+describe('more than four marks', () => {
+  const eight = [...tape, { x: 1500, y: 430 }, { x: 2650, y: 1300 }, { x: 1450, y: 2000 }, { x: 350, y: 1150 }];
+
+  it('are taken, some of them in line, as long as four stand well', () => {
+    expect(marksTrouble(marksOf(eight), photoSize)).toBeNull();
+    const inLine = marksOf([0, 500, 1000, 1500, 2000].map((x) => ({ x, y: 500 })));
+    expect(marksTrouble(inLine, photoSize)).toMatchObject({ code: expect.stringMatching(/^in line/) });
+  });
+
+  it('of which two have each other’s positions are refused with the exchange that works', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: 0, max: 3 }), fc.integer({ min: 0, max: 3 }), (a, b) => {
+        fc.pre(a !== b);
+        const right = marksOf(eight);
+        const typed = right.map((m, i) => ({ ...m, mm: right[i === a ? b : i === b ? a : i]!.mm }));
+        const trouble = marksTrouble(typed, photoSize);
+        expect(trouble).toMatchObject({ code: 'wrong order' });
+        expect(typed.map((m, i) => ({ ...m, mm: typed[trouble!.order![i]!]!.mm }))).toEqual(right);
+      }),
+    );
+  });
+
+  it('forty at the most are judged in the time of a picture’s frame or a few', () => {
+    const forty = marksOf(Array.from({ length: 40 }, (_, i) => ({ x: 200 + 330 * (i % 8), y: 300 + 380 * Math.floor(i / 8) })));
+    const row = marksOf(Array.from({ length: 40 }, (_, i) => ({ x: 200 + 65 * i, y: 300 })));
+    const began = performance.now();
+    expect(marksTrouble(forty, photoSize)).toBeNull();
+    expect(marksTrouble(row, photoSize)).toMatchObject({ code: expect.stringMatching(/^in line/) });
+    expect(performance.now() - began).toBeLessThan(1500);
+  });
+});
+
 describe('the straightened picture', () => {
   const wall = { widthMm: 3000, heightMm: 2400 };
 
