@@ -29,7 +29,7 @@ export function HangerFields({ value, onChange, onUsual, memberCount, insetMm, b
       {book && value.length > 0 ? (
         <div role="group" aria-label="All hangers" className="mb-4 border-l-4 border-plaster-200 pl-3">
           <p className="mb-1 font-semibold">Hardware of all hangers</p>
-          <div className="grid gap-3 sm:grid-cols-3">
+          <div className="grid gap-3">
             <HangerHardwareFields book={book} hangers={value} of="All hangers" onChange={(part) => onChange(value.map((hanger) => ({ ...hanger, ...part })))} />
           </div>
           <p className="mt-1 text-sm text-ink-700">From the hardware book. In a stud the screw counts, elsewhere the anchor; what is not chosen counts for nothing.</p>
@@ -54,7 +54,7 @@ export function HangerFields({ value, onChange, onUsual, memberCount, insetMm, b
             {book && value.length > 1 ? (
               <details className="mt-2">
                 <summary className="min-h-8 cursor-pointer py-1 text-sm font-semibold hover:text-chalk-700">Hardware of this hanger alone</summary>
-                <div className="grid gap-3 sm:grid-cols-3">
+                <div className="grid gap-3">
                   <HangerHardwareFields book={book} hangers={[hanger]} of={`Hanger ${i + 1}`} onChange={(part) => set(i, part)} />
                 </div>
               </details>

@@ -98,7 +98,7 @@ function PhotoBrightness() {
         value={Math.round(show.photo * 100)}
         aria-valuetext={`${Math.round(show.photo * 100)} %`}
         onChange={(event) => store.setState({ show: { ...show, photo: Number(event.target.value) / 100 } })}
-        className="h-6 w-24 accent-chalk-600"
+        className="h-6 w-16 accent-chalk-600"
       />
     </label>
   );

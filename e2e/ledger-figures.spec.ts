@@ -1,0 +1,49 @@
+import { expect, test, type Page } from '@playwright/test';
+
+async function openTheDemoLayout(page: Page, baseURL: string): Promise<void> {
+  const signIn = await page.request.post('/api/people/sign-in', { data: { email: 'maren@fennmark.example', password: 'chalk-line-and-plumb' }, headers: { Origin: baseURL } });
+  expect(signIn.ok()).toBe(true);
+  const jobs = (await (await page.request.get('/api/jobs')).json()) as { id: string; title: string }[];
+  const job = jobs.find((j) => j.title.startsWith('Reading room'))!;
+  const [layout] = (await (await page.request.get(`/api/jobs/${job.id}/layouts`)).json()) as { id: string }[];
+  await page.goto(`/jobs/${job.id}/layouts/${layout!.id}`);
+  await expect(page.getByRole('heading', { name: 'Loads' })).toBeVisible();
+}
+
+test('the ledger opens a load down to its formula and source, by keyboard', async ({ page, baseURL }) => {
+  await openTheDemoLayout(page, baseURL!);
+  const loads = page.getByRole('region', { name: 'Loads' });
+  await expect(loads.getByText('Weight on the wall')).toBeVisible();
+  await loads.locator('summary', { hasText: 'frame 1' }).first().focus();
+  await page.keyboard.press('Enter');
+  const hanger = loads.getByRole('region', { name: 'Hanger 1a of frame 1' });
+  await expect(hanger.getByText(/^V .+ lbf, T .+ lbf, R .+ lbf$/)).toBeVisible();
+  await hanger.locator('summary', { hasText: /^Out of the wall, T/ }).focus();
+  await page.keyboard.press('Enter');
+  await expect(hanger.getByText('Formula: T = W z h / Σh²', { exact: false })).toBeVisible();
+  await expect(hanger.getByText('Source: Elastic (vector) method', { exact: false })).toBeVisible();
+});
+
+test('studs are sought, previewed, put in place as one step, and taken back as one', async ({ page, baseURL }) => {
+  await openTheDemoLayout(page, baseURL!);
+  await page.getByRole('button', { name: 'Seek studs', exact: true }).click();
+  const panel = page.getByRole('region', { name: 'Seek studs' });
+  await expect(panel.locator('p', { hasText: 'Today:' })).toContainText('hangers in studs');
+  await expect(panel.getByRole('radio').first()).toBeChecked();
+  await panel.getByText('Hanger by hanger').click();
+  await expect(panel.getByRole('list', { name: 'Hangers and how they would stand' })).toContainText('In the stud');
+  const inStuds = Number(/(\d+) of \d+ hangers in studs/.exec((await panel.locator('p', { hasText: 'At best:' }).textContent())!)![1]);
+  await panel.getByRole('button', { name: 'Put it so' }).click();
+  await expect(panel).toHaveCount(0);
+  const findings = page.getByRole('region', { name: 'Findings' });
+  const missing = findings.locator('summary', { hasText: 'Hanger not in a stud' });
+  await expect(missing).toContainText(`× ${18 - inStuds}`);
+  await page.getByRole('button', { name: /^Undo: Studs sought/ }).click();
+  await expect(missing).toContainText('× 18');
+  await page.getByRole('button', { name: /^Redo: Studs sought/ }).click();
+  await expect(page.getByText(/^Saved/)).toBeVisible();
+  await page.reload();
+  await expect(missing).toContainText(`× ${18 - inStuds}`);
+  await page.getByRole('button', { name: 'Seek studs', exact: true }).click();
+  await expect(panel.locator('p', { hasText: 'Today:' })).toContainText(`${inStuds} of 18 hangers in studs`);
+});
