@@ -1,5 +1,5 @@
 import type { Homography, Point } from './homography.ts';
-import { lensOf, stretch, type LensTerm } from './lens.ts';
+import { cornerPercent, lensOf, stretch, type LensTerm } from './lens.ts';
 
 /**
  * How numbers are scaled while a photo is fitted: the picture about its centre by half its diagonal, the wall about
@@ -87,4 +87,11 @@ export function asParameters(f: CameraFrame, h: Homography): number[] {
   const [x, y, w] = [row(h[0], h[1], h[2]), row(h[3], h[4], h[5]), row(h[6], h[7], h[8])];
   const scaled = (part: [number, number, number], centre: number) => part.map((v, i) => (v - centre * w[i]!) / f.radiusPx / w[2]);
   return [...scaled(x, f.centre.x), ...scaled(y, f.centre.y), w[0] / w[2], w[1] / w[2], 0];
+}
+
+/** A lens in words: which way it bends, and by how much at the corners. */
+export function lensWords(lambda: number): string {
+  const percent = Math.abs(cornerPercent(lambda));
+  if (percent < 0.05) return 'The lens bends straight lines by less than 0.05 % at the corners.';
+  return `The lens bends straight lines ${lambda < 0 ? 'outwards like a barrel' : 'inwards like a pincushion'}: the corners are out by ${percent.toFixed(percent < 1 ? 2 : 1)} %; that is taken out.`;
 }

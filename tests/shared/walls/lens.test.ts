@@ -2,8 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { elevationPlanOf, elevationToPhoto } from '../../../shared/walls/elevation-plan.ts';
 import { applyHomography } from '../../../shared/walls/homography.ts';
-import { lensWords } from '../../../shared/walls/lens-words.ts';
 import { distorted, lensMagnification, lensOf, undistorted } from '../../../shared/walls/lens.ts';
+import { lensWords } from '../../../shared/walls/wall-camera.ts';
 
 const photo = { widthPx: 4000, heightPx: 3000 };
 const lambda = fc.double({ min: -0.5, max: 0.25, noNaN: true });
@@ -57,11 +57,9 @@ describe('an elevation by a bent lens', () => {
 });
 
 describe('the lens in words', () => {
-  it('is told by which way it bends, or that it bends no more than can be told, or that nobody knows it', () => {
-    const fitted = (cornerPercent: number) => lensWords({ state: 'fitted', lambda: cornerPercent / 100, cornerPercent, spreadPercent: 0.2 });
-    expect(fitted(-8.44)).toMatch(/like a barrel: the corners are out by 8\.4 %, give or take 0\.4/);
-    expect(fitted(3)).toMatch(/like a pincushion/);
-    expect(fitted(0.1)).toMatch(/no more than can be told/);
-    expect(lensWords({ state: 'left out', why: 'too little to tell it by' })).toMatch(/Four marks alone .* mark points along one/);
+  it('is told by which way it bends and by how much at the corners', () => {
+    expect(lensWords(-0.0844)).toMatch(/like a barrel: the corners are out by 8\.4 %/);
+    expect(lensWords(0.03)).toMatch(/like a pincushion/);
+    expect(lensWords(0.0001)).toMatch(/less than 0\.05 %/);
   });
 });
