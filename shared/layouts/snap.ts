@@ -1,33 +1,8 @@
-import Flatbush from 'flatbush';
 import { overlapDepth } from '../geometry/polygon-distance.ts';
-import { boxOf, placedAll, sidesOf, type Box, type Placement, type Point, type Polygon } from '../geometry/polygon.ts';
+import { boxOf, placedAll, type Placement, type Point, type Polygon } from '../geometry/polygon.ts';
+import { edgesOf, grown, type Edge, type EdgeField } from './snap-edges.ts';
 
-/** A frame that stays where it is while another is moved: its outline on the wall, counter-clockwise, convex, mm. */
-export interface Neighbour {
-  frameId: string;
-  outline: Polygon;
-}
-
-interface Edge {
-  frameId: string;
-  number: number;
-  a: Point;
-  /** Direction along the edge and its length; the frame lies on the left. */
-  ux: number;
-  uy: number;
-  length: number;
-  /** Outward from the frame at `a`, halfway between its two edges there; a unit vector. */
-  tipX: number;
-  tipY: number;
-}
-
-/** The edges of all frames that stay, in a spatial index. Built once when a drag begins. */
-export interface EdgeField {
-  neighbours: readonly Neighbour[];
-  edges: readonly Edge[];
-  near: (box: Box) => Edge[];
-  frames: (box: Box) => Neighbour[];
-}
+export { edgeField, type EdgeField, type Neighbour } from './snap-edges.ts';
 
 export interface SnapAsk {
   /** Outline of the moved frame about its own centroid, as its pattern gives it; counter-clockwise, convex. */
@@ -72,45 +47,6 @@ const LEAST_SHARE = 0.1;
 /** A corner points at another where the angle between their ways out is more than 120° (its cosine under this). */
 const FACING = -0.5;
 
-/** Puts the outlines of the frames that stay into an index. */
-export function edgeField(neighbours: readonly Neighbour[]): EdgeField {
-  const edges = neighbours.flatMap(({ frameId, outline }) => edgesOf(frameId, outline));
-  const byEdge = indexOf(edges.map((e) => boxOf([e.a, { x: e.a.x + e.ux * e.length, y: e.a.y + e.uy * e.length }])));
-  const byFrame = indexOf(neighbours.map(({ outline }) => boxOf(outline)));
-  return {
-    neighbours,
-    edges,
-    near: (box) => byEdge(box).map((i) => edges[i]!),
-    frames: (box) => byFrame(box).map((i) => neighbours[i]!),
-  };
-}
-
-function indexOf(boxes: Box[]): (box: Box) => number[] {
-  if (boxes.length === 0) return () => [];
-  const index = new Flatbush(boxes.length);
-  for (const { left, bottom, right, top } of boxes) index.add(left, bottom, right, top);
-  index.finish();
-  return ({ left, bottom, right, top }) => index.search(left, bottom, right, top);
-}
-
-function grown({ left, bottom, right, top }: Box, by: number): Box {
-  return { left: left - by, bottom: bottom - by, right: right + by, top: top + by };
-}
-
-function edgesOf(frameId: string, outline: Polygon): Edge[] {
-  const sides = sidesOf(outline).map(({ from, to }) => {
-    const length = Math.hypot(to.x - from.x, to.y - from.y);
-    return { a: from, ux: (to.x - from.x) / length, uy: (to.y - from.y) / length, length };
-  });
-  return sides.map((side, number) => {
-    const before = sides[(number + sides.length - 1) % sides.length]!;
-    const nx = before.uy + side.uy;
-    const ny = -before.ux - side.ux;
-    const size = Math.hypot(nx, ny) || 1;
-    return { frameId, number, ...side, tipX: nx / size, tipY: ny / size };
-  });
-}
-
 /** One outline of what the hand holds, and the edges it could meet. */
 interface Part {
   outline: Polygon;
@@ -140,14 +76,17 @@ export function strongestSnap(field: EdgeField, ask: SnapAsk): Snap | null {
   const parts = partsOf(field, ask, (own) => ask.revealMm + ask.reachMm + (ask.maxTurnRad > 0 ? radiusOf(own) * Math.min(ask.maxTurnRad, 1) : 0));
   const radius = radiusOf(ask.outline);
   const found: { snap: Snap; cost: number }[] = [];
+  const leastFacing = Math.cos(Math.max(ask.maxTurnRad, PARALLEL)) - 1e-12;
+  const seconds = secondsOf(parts, ask);
   parts.forEach((part, outline) => {
     for (const theirs of part.near) {
       for (const own of part.edges) {
+        if (facing(own, theirs) < leastFacing) continue;
         const toFace = turnToFace(own, theirs);
         // Rounding is no turn: a frame that lies parallel keeps its turn to the last digit.
         const turn = Math.abs(toFace) < PARALLEL / 10 ? 0 : toFace;
         if (Math.abs(turn) > Math.max(ask.maxTurnRad, PARALLEL)) continue;
-        for (const { snap, jump } of snapsOnto(theirs, parts, outline, own.number, turn, ask)) {
+        for (const { snap, jump } of snapsOnto(theirs, part, outline, own.number, turn, ask, seconds)) {
           const ease = { 'second frame': 0.6, corner: 0.5, along: 0, tip: 0 }[snap.fit] * ask.reachMm;
           found.push({ snap, cost: jump + 0.25 * radius * Math.abs(turn) - ease });
         }
@@ -181,8 +120,19 @@ export function strongestTip(field: EdgeField, ask: SnapAsk): Snap | null {
 
 function strongestOf(found: { snap: Snap; cost: number }[], field: EdgeField, parts: readonly Part[]): Snap | null {
   found.sort((p, q) => p.cost - q.cost);
-  return found.slice(0, mostTried).find(({ snap }) => isClear(field, parts.map((p) => p.outline), snap.placement))?.snap ?? null;
+  const outlines = parts.map((p) => p.outline);
+  const refused: Placement[] = [];
+  for (const { snap } of found.slice(0, mostTried)) {
+    // Edges in one line with one another lead to the same place.
+    if (refused.some((r) => Math.abs(r.xMm - snap.placement.xMm) < 1e-9 && Math.abs(r.yMm - snap.placement.yMm) < 1e-9 && Math.abs(r.turnRad - snap.placement.turnRad) < 1e-12)) continue;
+    if (isClear(field, outlines, snap.placement)) return snap;
+    refused.push(snap.placement);
+  }
+  return null;
 }
+
+/** How squarely an edge faces another: the cosine of the turn between, 1 where they are parallel and opposite. */
+const facing = (own: Edge, theirs: Edge) => -own.ux * theirs.ux - own.uy * theirs.uy;
 
 /** Turn, within half a circle either way, after which an edge runs opposite to the neighbour's. */
 function turnToFace(own: Edge, theirs: Edge): number {
@@ -191,9 +141,8 @@ function turnToFace(own: Edge, theirs: Edge): number {
   return Math.atan2(cross, dot);
 }
 
-function snapsOnto(theirs: Edge, parts: readonly Part[], outline: number, number: number, turn: number, ask: SnapAsk): { snap: Snap; jump: number }[] {
+function snapsOnto(theirs: Edge, part: Part, outline: number, number: number, turn: number, ask: SnapAsk, seconds: Seconds): { snap: Snap; jump: number }[] {
   const turnRad = ask.placement.turnRad + turn;
-  const part = parts[outline]!;
   const turned = turn === 0 ? part.held : placedAll(part.outline, { ...ask.placement, turnRad });
   const p = turned[number]!;
   const q = turned[(number + 1) % turned.length]!;
@@ -203,26 +152,24 @@ function snapsOnto(theirs: Edge, parts: readonly Part[], outline: number, number
   const away = ask.revealMm - (((p.x + q.x) / 2 - theirs.a.x) * nx + ((p.y + q.y) / 2 - theirs.a.y) * ny);
   if (Math.abs(away) > ask.reachMm) return [];
 
-  const at = (s: Point) => (s.x - theirs.a.x) * theirs.ux + (s.y - theirs.a.y) * theirs.uy;
-  const low = at(q);
-  const high = at(p);
+  const low = (q.x - theirs.a.x) * theirs.ux + (q.y - theirs.a.y) * theirs.uy;
+  const high = (p.x - theirs.a.x) * theirs.ux + (p.y - theirs.a.y) * theirs.uy;
+  // However it slides, it would not come to lie beside this edge.
+  if (high + ask.reachMm < 0 || low - ask.reachMm > theirs.length) return [];
   const slides: { slide: number; fit: SnapFit }[] = [
     { slide: 0, fit: 'along' },
     { slide: -low, fit: 'corner' },
     { slide: theirs.length - high, fit: 'corner' },
-    ...parts
-      .flatMap((other) => (other.near.length === 0 ? [] : slidesToSecond(turn === 0 ? other.edges : edgesOf('', placedAll(other.outline, { ...ask.placement, turnRad })), away * nx, away * ny, theirs, ask.revealMm, other.near)))
-      .map((slide) => ({ slide, fit: 'second frame' as const })),
   ];
+  for (const slide of slidesToSecond(seconds(turn), away * nx, away * ny, theirs, ask)) slides.push({ slide, fit: 'second frame' });
   const shorter = Math.min(high - low, theirs.length);
+  const half = ask.revealMm / 2;
   const snaps: { snap: Snap; jump: number }[] = [];
   for (const { slide, fit } of slides) {
     const from = Math.max(0, low + slide);
     const to = Math.min(theirs.length, high + slide);
     const jump = Math.hypot(away, slide);
     if (jump > ask.reachMm || to - from < shorter * LEAST_SHARE) continue;
-    const half = ask.revealMm / 2;
-    const onGuide = (s: number): Point => ({ x: theirs.a.x + theirs.ux * s + nx * half, y: theirs.a.y + theirs.uy * s + ny * half });
     const placement = {
       ...ask.placement,
       xMm: ask.placement.xMm + away * nx + slide * theirs.ux,
@@ -232,31 +179,59 @@ function snapsOnto(theirs: Edge, parts: readonly Part[], outline: number, number
     snaps.push({
       jump,
       snap: {
-        placement, fit, outline, edge: number, frameId: theirs.frameId, neighbourEdge: theirs.number,
-        distanceMm: jump, turnedRad: turn, guide: { from: onGuide(from), to: onGuide(to) },
+        placement, fit, outline, edge: number, frameId: theirs.frameId, neighbourEdge: theirs.number, distanceMm: jump, turnedRad: turn,
+        guide: {
+          from: { x: theirs.a.x + theirs.ux * from + nx * half, y: theirs.a.y + theirs.uy * from + ny * half },
+          to: { x: theirs.a.x + theirs.ux * to + nx * half, y: theirs.a.y + theirs.uy * to + ny * half },
+        },
       },
     });
   }
   return snaps;
 }
 
-/** Slides along one neighbour's edge that bring another edge of the frame to the reveal from a second frame. */
-function slidesToSecond(edges: readonly Edge[], dx: number, dy: number, along: Edge, revealMm: number, near: readonly Edge[]): number[] {
-  const slides: number[] = [];
-  for (const own of edges) {
-    for (const second of near) {
-      if (second.frameId === along.frameId) continue;
-      if (Math.abs(turnToFace(own, second)) > PARALLEL) continue;
-      const nx = second.uy;
-      const ny = -second.ux;
-      const rate = along.ux * nx + along.uy * ny;
-      if (Math.abs(rate) < 1e-3) continue;
-      const gap = (own.a.x + dx - second.a.x) * nx + (own.a.y + dy - second.a.y) * ny;
-      const slide = (revealMm - gap) / rate;
-      const at = (own.a.x + dx + along.ux * slide - second.a.x) * second.ux + (own.a.y + dy + along.uy * slide - second.a.y) * second.uy;
-      const shared = Math.min(second.length, at) - Math.max(0, at - own.length);
-      if (shared >= LEAST_SHARE * Math.min(own.length, second.length)) slides.push(slide);
+/** Pairs of an own edge, as turned, and an edge of a neighbour parallel to it: what could meet as a second frame. */
+type Seconds = (turn: number) => readonly { own: Edge; second: Edge }[];
+
+/** The pairs for each turn, worked out once: the edges of one neighbour mostly ask for the same few turns. */
+function secondsOf(parts: readonly Part[], ask: SnapAsk): Seconds {
+  const known = new Map<number, { own: Edge; second: Edge }[]>();
+  return (turn) => {
+    // Turns that differ by rounding are one.
+    const key = Math.round(turn / PARALLEL);
+    let pairs = known.get(key);
+    if (!pairs) {
+      pairs = [];
+      for (const part of parts) {
+        if (part.near.length === 0) continue;
+        const edges = turn === 0 ? part.edges : edgesOf('', placedAll(part.outline, { ...ask.placement, turnRad: ask.placement.turnRad + turn }));
+        for (const own of edges) {
+          for (const second of part.near) {
+            if (facing(own, second) > 0 && Math.abs(own.ux * second.uy - own.uy * second.ux) <= PARALLEL) pairs.push({ own, second });
+          }
+        }
+      }
+      known.set(key, pairs);
     }
+    return pairs;
+  };
+}
+
+/** Slides along one neighbour's edge, within reach, that bring another edge to the reveal from a second frame. */
+function slidesToSecond(pairs: ReturnType<Seconds>, dx: number, dy: number, along: Edge, { revealMm, reachMm }: SnapAsk): number[] {
+  const slides: number[] = [];
+  for (const { own, second } of pairs) {
+    if (second.frameId === along.frameId) continue;
+    const nx = second.uy;
+    const ny = -second.ux;
+    const rate = along.ux * nx + along.uy * ny;
+    if (Math.abs(rate) < 1e-3) continue;
+    const gap = (own.a.x + dx - second.a.x) * nx + (own.a.y + dy - second.a.y) * ny;
+    const slide = (revealMm - gap) / rate;
+    if (Math.abs(slide) > reachMm) continue;
+    const at = (own.a.x + dx + along.ux * slide - second.a.x) * second.ux + (own.a.y + dy + along.uy * slide - second.a.y) * second.uy;
+    const shared = Math.min(second.length, at) - Math.max(0, at - own.length);
+    if (shared >= LEAST_SHARE * Math.min(own.length, second.length)) slides.push(slide);
   }
   return slides;
 }

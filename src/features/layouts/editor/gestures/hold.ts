@@ -35,8 +35,13 @@ export interface Settled {
   offered: Snap | null;
 }
 
+/** Most that a snap moves a frame, as a share of its largest radius. */
+const mostJump = 0.5;
+
 /** The strongest snap for what is held, taken: a neighbour's edge first, then a corner, then the lines of the wall. */
-export function settleHold(around: Surroundings, holding: Holding, placement: Placement, how: How): Settled {
+export function settleHold(around: Surroundings, holding: Holding, placement: Placement, asked: How): Settled {
+  // However far off the wall is seen, a frame does not jump by more than half of itself.
+  const how = { ...asked, reachMm: Math.min(asked.reachMm, mostJump * Math.max(...holding.outline.map((p) => Math.hypot(p.x, p.y)))) };
   const loose: Settled = { placement, snap: null, lines: [], offered: null };
   if (!how.snapping) return loose;
   const ask: SnapAsk = { outline: holding.outline, body: holding.body, placement, revealMm: how.revealMm, reachMm: how.reachMm, maxTurnRad: holding.maxTurnRad };
@@ -51,7 +56,8 @@ export function settleHold(around: Surroundings, holding: Holding, placement: Pl
     placement: { ...placement, xMm: placement.xMm + by('x'), yMm: placement.yMm + by('y') },
     snap: null,
     lines: lines.map(({ line }) => line),
-    offered: strongestSnap(around.edges, { ...ask, reachMm: 2 * how.reachMm }),
+    // A frame held over another is on its way past it, and about to meet nothing.
+    offered: isClear(around.edges, [holding.outline, ...holding.body], placement) ? strongestSnap(around.edges, { ...ask, reachMm: 2 * how.reachMm }) : null,
   };
 }
 

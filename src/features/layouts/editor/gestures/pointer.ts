@@ -21,7 +21,8 @@ export interface PointerNeeds {
 }
 
 type Doing =
-  | { kind: 'pressed'; frame: Frame; at: Point; ids: readonly string[] }
+  /** What would be carried is made ready at the press, so that the first move is as light as the rest; null where all of it is locked. */
+  | { kind: 'pressed'; frame: Frame; at: Point; carry: Carry | null }
   | { kind: 'carrying'; carry: Carry }
   | { kind: 'turning'; frame: Frame }
   /** A box drawn over the bare wall; `base` was chosen before, with Shift. */
@@ -96,7 +97,7 @@ export function listenToPointer(element: HTMLElement, { store, designs, wall, re
     const among = selected.includes(frame.id);
     const ids = event.shiftKey ? (among ? selected.filter((id) => id !== frame.id) : [...selected, frame.id]) : among ? selected : [frame.id];
     store.dispatch({ kind: 'select', ids });
-    if (!readOnly() && ids.includes(frame.id)) doing = { kind: 'pressed', frame, at: point, ids };
+    if (!readOnly() && ids.includes(frame.id)) doing = { kind: 'pressed', frame, at: point, carry: takeUp(bench, designs(), frame.id, ids, toWall(view, point), wall()) };
   }
 
   function handleAt(point: Point): Frame | null {
@@ -119,7 +120,7 @@ export function listenToPointer(element: HTMLElement, { store, designs, wall, re
     switch (doing.kind) {
       case 'pressed': {
         if (distance(doing.at, point) < stirPx) return;
-        const carry = takeUp(bench, designs(), doing.frame.id, doing.ids, onWall(doing.at), wall());
+        const { carry } = doing;
         if (!carry) {
           store.dispatch({ kind: 'say', words: `Frame ${doing.frame.label} is locked in its place.` });
           doing = null;
