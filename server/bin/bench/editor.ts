@@ -2,6 +2,7 @@ import { spawn, type ChildProcess } from 'node:child_process';
 import { randomUUID } from 'node:crypto';
 import path from 'node:path';
 import { chromium, type Browser, type Page } from '@playwright/test';
+import type KonvaLibrary from 'konva';
 import { demoOwner } from '../../database/seed/accounts.ts';
 import { build, isBuilt } from '../prepare/build.ts';
 import { freePort } from '../prepare/ports.ts';
@@ -135,7 +136,7 @@ async function layoutOf500(page: Page, origin: string): Promise<string> {
 
 /** Runs in the page: 500 equal polygons on one layer, the middle one to be dragged. */
 function bareStage({ width, height, count: n, columns: across }: { width: number; height: number; count: number; columns: number }): void {
-  const { Konva } = globalThis as unknown as { Konva: typeof import('konva').default };
+  const { Konva } = globalThis as unknown as { Konva: typeof KonvaLibrary };
   document.body.style.margin = '0';
   document.body.innerHTML = '<div id="bare"></div>';
   const stage = new Konva.Stage({ container: 'bare' as never, width, height });
