@@ -40,7 +40,7 @@ export function ScrewTable({ screws, ...deeds }: { screws: readonly Screw[] } & 
       <tbody>
         {byName(screws).map((screw) => (
           <tr key={screw.id}>
-            <Th scope="row">{screw.name}</Th>
+            <Th scope="row" className="min-w-40">{screw.name}</Th>
             <Td figure>
               <LengthText mm={screw.lengthMm} />
             </Td>
@@ -83,7 +83,7 @@ export function BracketTable({ brackets, screws, ...deeds }: { brackets: readonl
           const screw = screws.find((s) => s.id === bracket.frameScrewId);
           return (
             <tr key={bracket.id}>
-              <Th scope="row">{bracket.name}</Th>
+              <Th scope="row" className="min-w-40">{bracket.name}</Th>
               <Td figure>{bracket.ratingN === null ? <NoRating /> : formatLoad(bracket.ratingN, units)}</Td>
               <Td figure className="whitespace-nowrap">
                 {fineLength(bracket.steelMm, units)}
@@ -131,7 +131,7 @@ export function AnchorTable({ anchors, ...deeds }: { anchors: readonly Anchor[] 
             );
           return (
             <tr key={anchor.id}>
-              <Th scope="row">{anchor.name}</Th>
+              <Th scope="row" className="min-w-40">{anchor.name}</Th>
               <Td className="first-letter:uppercase">{anchor.kind}</Td>
               <Td className="first-letter:uppercase">{anchor.ratedAs}</Td>
               <Td figure>{cell(anchor.shearN, allowed.shearN)}</Td>

@@ -24,7 +24,11 @@ export function SeekPanel({ checks }: { checks: Checks | null }) {
   const [picked, setPicked] = useState<string | null>(null);
   const choice = choices.find((c) => c.key === picked) ?? choices.find((c) => c.best) ?? choices[0] ?? null;
 
-  useEffect(() => heading.current?.focus(), []);
+  useEffect(() => {
+    heading.current?.focus();
+    // Where the ledger stands below the wall the panel would open out of sight.
+    heading.current?.closest('section')?.scrollIntoView({ block: 'nearest' });
+  }, []);
   useEffect(() => {
     if (!checks || !choice) return;
     const edits = seekEdits(checks.frames, choice.of);
