@@ -50,7 +50,7 @@ export function layoutsService({ layouts, jobs, walls, patterns, clock }: Needs)
       patterns: used.map(({ id, name, design }): LayoutPattern => ({ id, name, design })),
       wall: {
         name: wall.name, widthMm: wall.widthMm, heightMm: wall.heightMm, construction: wall.construction, coveringMm: wall.coveringMm, studSpecies: wall.studSpecies,
-        studs: wall.studs, obstructions: wall.obstructions, zones: wall.zones,
+        outlineMm: wall.outlineMm, studs: wall.studs, obstructions: wall.obstructions, zones: wall.zones,
       },
       elevation: picture && { photoId: picture.photoId, sha256: picture.sha256, leftMm: picture.leftMm, bottomMm: picture.bottomMm, widthMm: picture.widthMm, heightMm: picture.heightMm },
     };

@@ -7,7 +7,7 @@ import type { WallWhole } from './walls.repository.ts';
 export function told(wall: WallWhole): Wall {
   return {
     id: wall.id, jobId: wall.jobId, name: wall.name, widthMm: wall.widthMm, heightMm: wall.heightMm, construction: wall.construction,
-    coveringMm: wall.coveringMm, studSpecies: wall.studSpecies, version: wall.version, obstructions: wall.obstructions, zones: wall.zones,
+    coveringMm: wall.coveringMm, studSpecies: wall.studSpecies, version: wall.version, outlineMm: wall.outlineMm, obstructions: wall.obstructions, zones: wall.zones,
     studs: wall.studs.map(({ id, xMm, widthMm, foundBy, uncertaintyMm }) => ({ id, xMm, widthMm, foundBy, uncertaintyMm })),
     photo: wall.photo && toldPhoto(wall.photo),
   };

@@ -6,7 +6,7 @@ import { photosRepository } from './photos.repository.ts';
 /** A wall with its studs from left to right and the photo in force. */
 export type WallWhole = WallRow & { studs: StudRow[]; photo: PhotoRow | null };
 
-export type WallValues = Partial<Pick<WallRow, 'name' | 'widthMm' | 'heightMm' | 'construction' | 'coveringMm' | 'studSpecies' | 'obstructions' | 'zones'>>;
+export type WallValues = Partial<Pick<WallRow, 'name' | 'widthMm' | 'heightMm' | 'construction' | 'coveringMm' | 'studSpecies' | 'outlineMm' | 'obstructions' | 'zones'>>;
 
 export function wallsRepository(data: DataSource) {
   const walls = data.getRepository(WallRow);

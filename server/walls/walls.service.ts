@@ -38,7 +38,7 @@ export function wallsService({ walls, jobs, files, pool, clock }: Needs) {
 
     async create(who: Who, jobId: string, shape: WallShape): Promise<Wall> {
       const job = await jobs.jobFor(who, jobId);
-      const row = { id: randomUUID(), shopId: who.shopId, jobId, ...shape, obstructions: [], zones: [], photoId: null, version: 1, createdAt: clock() };
+      const row = { id: randomUUID(), shopId: who.shopId, jobId, ...shape, outlineMm: shape.outlineMm ?? null, obstructions: [], zones: [], photoId: null, version: 1, createdAt: clock() };
       await walls.add(row);
       await jobs.touch(job);
       return told({ ...row, studs: [], photo: null });

@@ -3,7 +3,8 @@ import { boxOf, boxRing, placedAll, type Polygon } from '../geometry/polygon.ts'
 import { frameGeometry } from '../patterns/frame.ts';
 import { placedHangers, type HangerPlacement } from '../patterns/hangers.ts';
 import type { PatternDesign, Species } from '../patterns/pattern.ts';
-import { isConfirmed, type Obstruction, type Stud } from '../walls/wall.ts';
+import { faceTopAt, wallFace } from '../walls/wall-face.ts';
+import { isConfirmed, type Obstruction, type Stud, type WallOutline } from '../walls/wall.ts';
 import type { Frame, LayoutPattern } from './layout.ts';
 
 /** What a thing is drawn as; each pen knows the colours and line weights of its medium. */
@@ -25,7 +26,7 @@ export type Primitive =
 export interface ElevationPicture { url: string; leftMm: number; bottomMm: number; widthMm: number; heightMm: number }
 
 /** What of a wall is drawn; a `Wall` and a snapshot's wall are both such. */
-export interface DrawnWall { widthMm: number; heightMm: number; studs: readonly Stud[]; obstructions: readonly Obstruction[] }
+export interface DrawnWall { widthMm: number; heightMm: number; outlineMm?: WallOutline | null; studs: readonly Stud[]; obstructions: readonly Obstruction[] }
 
 const hatchPitchMm = 45;
 const hangerRadiusMm = 7;
@@ -100,14 +101,14 @@ export function brought(primitive: Primitive, at: Omit<Placement, 'flipped'>): P
 
 /** The wall by itself: its face or its photo, studs as chalk-dashed bands (those unconfirmed with a question mark), obstructions hatched. */
 export function wallDrawing(wall: DrawnWall, picture: ElevationPicture | null): { ground: Primitive[]; studs: Primitive[]; obstructions: Primitive[] } {
-  const face = boxRing({ left: 0, bottom: 0, right: wall.widthMm, top: wall.heightMm });
+  const face = wallFace(wall);
   const ground: Primitive[] = [{ kind: 'area', ink: 'wall', points: face, holes: [] }];
   if (picture) {
     const { leftMm, bottomMm, widthMm, heightMm } = picture;
     ground.push({ kind: 'picture', url: picture.url, corners: boxRing({ left: leftMm, bottom: bottomMm, right: leftMm + widthMm, top: bottomMm + heightMm }) });
   }
   ground.push({ kind: 'line', ink: 'wall rim', points: face, closed: true, dashed: false });
-  const studs = wall.studs.flatMap((stud) => studDrawing(stud, wall.heightMm));
+  const studs = wall.studs.flatMap((stud) => studDrawing(stud, faceTopAt(wall, stud.xMm)));
   const obstructions = wall.obstructions.map((o): Primitive => ({ kind: 'hatch', ink: 'obstruction', pitchMm: hatchPitchMm, points: o.outlineMm.map(([x, y]) => ({ x, y })) }));
   return { ground, studs, obstructions };
 }

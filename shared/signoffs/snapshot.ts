@@ -28,14 +28,14 @@ type Content = Pick<Snapshot, 'layoutId' | 'sheet' | 'frames' | 'patterns' | 'wa
 const inOrder = <T extends { id: string }>(list: readonly T[]) => [...list].sort((a, b) => (a.id < b.id ? -1 : a.id > b.id ? 1 : 0));
 
 /**
- * Lists by id. The species of the studs came later to the format than the rest: where it is the usual one, which is what its absence is read
- * as, it is left out, so that what was sent before keeps its hash.
+ * Lists by id. The species of the studs and the wall's outline came later to the format than the rest: where they are the usual ones, which is
+ * what their absence is read as, they are left out, so that what was sent before keeps its hash.
  */
 const ordered = <C extends Content>(content: C) => ({
   ...content,
   frames: inOrder(content.frames),
   patterns: inOrder(content.patterns),
-  wall: { ...content.wall, studSpecies: content.wall.studSpecies === usualStudSpecies ? undefined : content.wall.studSpecies, studs: inOrder(content.wall.studs), obstructions: inOrder(content.wall.obstructions), zones: inOrder(content.wall.zones) },
+  wall: { ...content.wall, studSpecies: content.wall.studSpecies === usualStudSpecies ? undefined : content.wall.studSpecies, outlineMm: content.wall.outlineMm ?? undefined, studs: inOrder(content.wall.studs), obstructions: inOrder(content.wall.obstructions), zones: inOrder(content.wall.zones) },
 });
 
 /** The one text of a snapshot that is hashed: JSON in canonical form (RFC 8785), lists ordered by id. */

@@ -47,6 +47,10 @@ export type Obstruction = z.infer<typeof Obstruction>;
 export const Zone = z.object({ id, kind: z.enum(['passage', 'seat', 'bed']), fromMm: positionMm, toMm: positionMm });
 export type Zone = z.infer<typeof Zone>;
 
+/** The wall's outline, mm, at least three corners going round, where it is no upright rectangle: under a sloped ceiling for instance. */
+export const WallOutline = z.array(z.tuple([positionMm, positionMm])).min(3, 'An outline has at least three corners.').max(20, 'An outline has at most 20 corners.');
+export type WallOutline = z.infer<typeof WallOutline>;
+
 export const WallShape = z.object({
   name: z.string().trim().min(1, 'Please name the wall.').max(80),
   widthMm: wallLengthMm,
@@ -56,6 +60,8 @@ export const WallShape = z.object({
   coveringMm: z.number().finite().min(0).max(100, 'A covering is at most 100 mm thick.'),
   /** Species group of the framing (or of a solid wood wall): how hard its wood holds a screw. */
   studSpecies: StudSpecies.default(usualStudSpecies),
+  /** Within width and height; none for a wall that fills them. */
+  outlineMm: WallOutline.nullish(),
 });
 export type WallShape = z.infer<typeof WallShape>;
 

@@ -1,5 +1,5 @@
 import { Entity, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
-import type { Mark, Obstruction, Photo, Stud, WallShape, Zone } from '../../../shared/walls/wall.ts';
+import type { Mark, Obstruction, Photo, Stud, WallOutline, WallShape, Zone } from '../../../shared/walls/wall.ts';
 import type { FitReport } from '../../../shared/walls/fit-report.ts';
 import type { KnownBeside } from '../../../shared/walls/photo.ts';
 import { Instant, Json, Mm, Ref, Text, Whole } from './columns.ts';
@@ -19,6 +19,8 @@ export class WallRow {
   @Text(20) construction: WallShape['construction'];
   @Mm() coveringMm: number;
   @Text(30) studSpecies: WallShape['studSpecies'];
+  /** Null: the whole of width by height. */
+  @Json({ nullable: true }) outlineMm: WallOutline | null;
   @Json() obstructions: Obstruction[];
   @Json() zones: Zone[];
   /** The photo in force. No foreign key: photos point at walls, and a circle of keys cannot be filled. */

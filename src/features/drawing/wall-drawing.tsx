@@ -8,7 +8,7 @@ import { SvgPen } from './svg-pen.tsx';
 import { viewBoxOf } from './svg-path.ts';
 
 interface Props {
-  wall: Pick<Wall, 'widthMm' | 'heightMm' | 'studs' | 'obstructions'>;
+  wall: Pick<Wall, 'widthMm' | 'heightMm' | 'outlineMm' | 'studs' | 'obstructions'>;
   elevation: ElevationPicture | null;
   frames?: readonly Frame[];
   /** Patterns of the frames; frames without theirs are left out. */

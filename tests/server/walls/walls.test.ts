@@ -39,6 +39,17 @@ describe('a wall', () => {
     expect(wrong.body.fields).toEqual([{ path: 'studSpecies', words: 'This species group is not in the table.' }]);
   });
 
+  it('keeps the outline of a sloped ceiling until it is a rectangle again', async () => {
+    const wall = await aWall();
+    const outlineMm = [[0, 0], [3000, 0], [3000, 2400], [1500, 2400], [0, 1200]];
+    const saved = await owner.patch(`/api/walls/${wall.id}`).send({ version: wall.version, outlineMm }).expect(200);
+    expect(saved.body).toMatchObject({ outlineMm });
+    const named = await owner.patch(`/api/walls/${wall.id}`).send({ version: saved.body.version, name: 'Loft wall' }).expect(200);
+    expect(named.body).toMatchObject({ outlineMm });
+    const square = await owner.patch(`/api/walls/${wall.id}`).send({ version: named.body.version, outlineMm: null }).expect(200);
+    expect(square.body.outlineMm).toBeNull();
+  });
+
   it('saved by two people is never overwritten in silence: the later is told what stands', async () => {
     const wall = await aWall();
     await owner.patch(`/api/walls/${wall.id}`).send({ version: wall.version, widthMm: 4000 }).expect(200);

@@ -40,6 +40,17 @@ describe('frames on the wall', () => {
     expect(found(aScene({ frames: [aFrame(patternId, { yMm: 2600 - flats / 2 + 1 })] }))['off the wall']).toBe('stop');
   });
 
+  it('cannot reach past a sloped ceiling, though within the wall’s width and height', () => {
+    // A roof of 45° from a knee wall of 1000 mm at the left: at x it is 1000 + x high. The hexagon's upper left corner stands at
+    // (x − s/2, y + √3/2·s), so its distance to the slope is (1000 + x − s/2 − y − √3/2·s) / √2.
+    const sloped = { ...aScene().wall, outlineMm: [[0, 0], [4000, 0], [4000, 2600], [1600, 2600], [0, 1000]] as [number, number][] };
+    const at = (roomMm: number) => ({ ...aScene({ frames: [aFrame(patternId, { xMm: 800, yMm: 1800 - side / 2 - flats / 2 - roomMm * Math.SQRT2 })] }), wall: sloped });
+    const [finding] = only(at(-10), 'off the wall');
+    expect(finding).toMatchObject({ weight: 'stop', words: expect.stringMatching(/outline/) as string });
+    expect(finding!.figures[0]!.value).toBeCloseTo(10, 6);
+    expect(found(at(10))['off the wall']).toBeUndefined();
+  });
+
   it('may not cover an obstruction, nor come nearer than its clearance', () => {
     const at = (left: number) => found(aScene({ wall: { obstructions: [anObstruction('vent', left, 1400, 100, 100, 50)] } }))['over an obstruction'];
     expect(at(1900)).toBe('stop');

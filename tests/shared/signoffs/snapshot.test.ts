@@ -19,6 +19,13 @@ describe('what was signed before studs had a species and hangers could slide', (
     expect(JSON.parse(canonicalText(read))).toEqual(old);
   });
 
+  it('keeps its text where the wall has no outline of its own, and differs once it has one', () => {
+    const now = snapshot();
+    const text = contentText(now);
+    expect(contentText({ ...now, wall: { ...now.wall, outlineMm: null } })).toBe(text);
+    expect(contentText({ ...now, wall: { ...now.wall, outlineMm: [[0, 0], [4000, 0], [0, 2000]] } })).not.toBe(text);
+  });
+
   it('differs from the bench once another species is chosen or a hanger slid', () => {
     const now = snapshot();
     const text = contentText(now);
