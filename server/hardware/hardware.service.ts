@@ -12,7 +12,7 @@ import type { HardwareRepository } from './hardware.repository.ts';
 
 /** Screws that a new shop finds in its book: usual sizes at usual lengths, by the published dimensions. */
 const usualScrews: HardwareItem[] = [
-  ...([['#8', 1.25], ['#8', 2], ['#10', 1.5], ['#10', 2], ['#10', 2.5], ['#10', 3], ['#12', 2.5], ['#12', 3], ['#14', 3]] as const).map(([size, inches]): HardwareItem => ({
+  ...([['#8', 1.25], ['#8', 2], ['#10', 1.5], ['#10', 1.75], ['#10', 2], ['#10', 2.5], ['#10', 3], ['#12', 2.5], ['#12', 3], ['#14', 3]] as const).map(([size, inches]): HardwareItem => ({
     kind: 'screw', name: `Wood screw ${size} × ${inchText(inches)}`, body: standardWoodScrew(size, inches * MM_PER_INCH),
   })),
   ...([['1/4', 2.5], ['1/4', 3], ['5/16', 3]] as const).map(([size, inches]): HardwareItem => ({

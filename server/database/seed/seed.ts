@@ -1,7 +1,10 @@
 import { copyFileSync, mkdtempSync, rmSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
-import type { Frame } from '../../../shared/layouts/layout.ts';
+import { placeFrame } from '../../../shared/findings/placed-frame.ts';
+import { usualLimits } from '../../../shared/findings/scene.ts';
+import { seekEdits, seekOnWall } from '../../../shared/findings/seek-on-wall.ts';
+import type { Frame, Layout } from '../../../shared/layouts/layout.ts';
 import type { Rooms } from '../../app.ts';
 import type { Who } from '../../http/who.ts';
 import type { Database } from '../data-source.ts';
@@ -39,16 +42,16 @@ async function seed(data: Database, rooms: Rooms): Promise<void> {
   const book = await rooms.hardware.add(who, demoAnchor);
   const patterns = new Map<string, string>();
   for (const pattern of demoPatterns(book)) patterns.set(pattern.name, (await rooms.patterns.create(who, pattern)).id);
-  const plain = patterns.get('Comb 8')!;
-  const mirror = patterns.get('Comb 8 with mirror')!;
+  const plain = patterns.get('Comb 10 1/2')!;
+  const mirror = patterns.get('Comb 10 1/2 with mirror')!;
 
   // Signed and on the bench: a comb of nine over the sideboard.
   const reading = await measuredJob(rooms, who, 'reading-room', {
     title: 'Reading room, Sallow Street', clientName: 'Tamsin Okoro', clientEmail: 'tamsin@okoro.example', site: '18 Sallow Street, Port Selwick',
   }, 0, []);
-  const readingLayout = await laidOut(rooms, who, reading.wallId, 'Over the sideboard', 0.25 * inch, comb({ xMm: 2560, yMm: 1560, sideMm: 8 * inch, revealMm: 0.25 * inch }, [
+  const readingLayout = await onStuds(rooms, who, await laidOut(rooms, who, reading.wallId, 'Over the sideboard', 0.25 * inch, comb({ xMm: 2620, yMm: 1580, sideMm: 10.5 * inch, revealMm: 0.25 * inch }, [
     [-2, 0, plain], [-1, 0, mirror], [0, 0, plain], [1, 0, plain], [2, 0, mirror], [-1, -1, plain], [0, 1, mirror], [1, -1, plain], [-2, 1, plain],
-  ]));
+  ])));
   const sent = await rooms.signoffs.send(who, readingLayout.id, { version: readingLayout.version, note: 'The mirrors catch the window in the morning.' });
   const revision = sent.revisions[0]!;
   await rooms.signoffs.sign(await mailedToken(data, 'tamsin@okoro.example'), revision.id, { name: 'Tamsin Okoro', sha256: revision.sha256, agreed: true });
@@ -59,16 +62,16 @@ async function seed(data: Database, rooms: Rooms): Promise<void> {
   const cafe = await measuredJob(rooms, who, 'cafe-counter', {
     title: 'Café counter, Tidewater Arcade', clientName: 'Bela Marsh', clientEmail: 'bela@tidewater.example', site: 'Unit 6, Tidewater Arcade, Port Selwick',
   }, 1, [zone('seat', 300, 3600)]);
-  const cafeLayout = await laidOut(rooms, who, cafe.wallId, 'Row above the tiles', 0.25 * inch, comb({ xMm: 1950, yMm: 1680, sideMm: 8 * inch, revealMm: 0.25 * inch }, [
+  const cafeLayout = await onStuds(rooms, who, await laidOut(rooms, who, cafe.wallId, 'Row above the tiles', 0.25 * inch, comb({ xMm: 2200, yMm: 1680, sideMm: 10.5 * inch, revealMm: 0.25 * inch }, [
     [-4, 0, plain], [-3, 0, plain], [-2, 0, plain], [-1, 0, plain], [0, 0, plain], [1, 0, plain], [2, 0, plain], [3, 0, plain],
-  ]));
+  ])));
   await rooms.signoffs.send(who, cafeLayout.id, { version: cafeLayout.version, note: 'Eight boxes for the cups. Please look whether the row is high enough over the machine.' });
 
   // Still being measured and drawn.
   const hall = await measuredJob(rooms, who, 'stairwell-hall', {
     title: 'Stair hall, Hollin House', clientName: 'Ines Caddow', clientEmail: 'ines@hollin.example', site: 'Hollin House, Upper Reach, Port Selwick',
   }, 3, [zone('passage', 1080, 1560)]);
-  await laidOut(rooms, who, hall.wallId, 'Climbing', 0.25 * inch, comb({ xMm: 2150, yMm: 1450, sideMm: 8 * inch, revealMm: 0.25 * inch }, [
+  await laidOut(rooms, who, hall.wallId, 'Climbing', 0.25 * inch, comb({ xMm: 2150, yMm: 1450, sideMm: 10.5 * inch, revealMm: 0.25 * inch }, [
     [-1, -1, plain], [0, 0, mirror], [1, 0, plain], [2, 1, plain],
   ]));
 }
@@ -94,6 +97,15 @@ async function measuredJob(rooms: Rooms, who: Who, sceneName: string, sheet: { t
 async function laidOut(rooms: Rooms, who: Who, wallId: string, name: string, revealMm: number, frames: Frame[]) {
   const layout = await rooms.layouts.create(who, wallId, { name, revealMm });
   return rooms.layouts.edit(who, layout.id, { version: layout.version, edits: frames.map((after) => ({ kind: 'frame' as const, frameId: after.id, before: null, after })) });
+}
+
+/** Moves the layout, and each hanger within its allowance, to where the most of them meet studs. */
+async function onStuds(rooms: Rooms, who: Who, layout: Layout): Promise<Layout> {
+  const [wall, book, patterns] = await Promise.all([rooms.walls.read(who, layout.wallId), rooms.hardware.book(who), rooms.patterns.list(who)]);
+  const placed = layout.frames.map((frame) => placeFrame(frame, patterns.find((p) => p.id === frame.patternId)!));
+  const best = seekOnWall(placed, { wall, book, limits: usualLimits })?.best[0];
+  const edits = best ? seekEdits(placed, best) : [];
+  return edits.length > 0 ? rooms.layouts.edit(who, layout.id, { version: layout.version, edits }) : layout;
 }
 
 /** The token of the newest link mailed to an address, read where it alone stands: in the mail. */
