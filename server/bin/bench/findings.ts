@@ -77,6 +77,6 @@ export async function run(): Promise<string[]> {
     `200 frames, ${found} findings`,
     `after moving one frame: median ${median(moves).toFixed(2)} ms, at best ${Math.min(...moves).toFixed(2)}, p95 ${worst(moves).toFixed(2)} ms (goal 4 ms)`,
     `full pass: median ${median(full).toFixed(1)} ms, at best ${Math.min(...full).toFixed(1)}, the first of all ${cold.toFixed(1)} ms (goal 60 ms); a full pass takes ${ratio.toFixed(1)} times a move`,
-    `processor time, mean with garbage collection: ${moveCpu.toFixed(2)} ms a move, ${fullCpu.toFixed(1)} ms a full pass (what a busy machine cannot distort)`,
+    `processor time, mean with garbage collection: ${moveCpu.toFixed(2)} ms a move, ${fullCpu.toFixed(1)} ms a full pass (on a busy machine nearer the work itself than the clock)`,
   ];
 }
