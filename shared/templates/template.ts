@@ -46,9 +46,9 @@ export function planNotes(input: TemplateInput, plan: SheetPlan): string[] {
   const notes: string[] = [];
   if (isRoll(input.paper)) {
     const along = Math.max(format.widthMm, format.heightMm);
-    const pieces = plan.sheets.length;
+    const inLine = new Set(plan.sheets.map((s) => (format.orientation === 'portrait' ? s.row : s.column))).size;
     if (along > 5080) notes.push('A page is longer than 14,400 units (5.08 m), so the file scales its units (UserUnit). Some printers’ programs do not heed that: check the bars, or choose split pages.');
-    else if (pieces > 1 && along > 4000) notes.push('What is drawn is longer than 14,400 units (5.08 m), the most that every reader of PDF takes, so it is split into pieces.');
+    else if (inLine > 1) notes.push('What is drawn is longer than 14,400 units (5.08 m), the most that every reader of PDF takes, so it is split into pieces.');
   }
   return notes;
 }

@@ -9,7 +9,8 @@ interface Props {
   title: string;
   /** What it is for, in a sentence. */
   about?: ReactNode;
-  wide?: boolean;
+  /** `all`: nearly the whole window, for a dialog that one works in. */
+  wide?: boolean | 'all';
   children: ReactNode;
 }
 
@@ -23,7 +24,7 @@ export function Dialog({ open, onOpenChange, title, about, wide = false, childre
           aria-describedby={about ? undefined : ''}
           className={classNames(
             'fixed inset-x-0 bottom-0 z-50 mx-auto flex max-h-[94dvh] w-full flex-col border border-ink-700 bg-plaster-50 sm:inset-y-0 sm:my-auto sm:h-fit',
-            wide ? 'sm:max-w-4xl' : 'sm:max-w-lg',
+            wide === 'all' ? 'sm:max-w-[88rem]' : wide ? 'sm:max-w-4xl' : 'sm:max-w-lg',
           )}
         >
           <header className="flex items-start justify-between gap-4 border-b border-ink-700 px-5 py-3">

@@ -1,63 +1,69 @@
-import { useMutation } from '@tanstack/react-query';
+import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { type Paper, paperName, papers } from '../../../shared/templates/papers.ts';
-import { templatesApi } from '../../../shared/templates/templates.api.ts';
-import { Button } from '../../components/button.tsx';
-import { Actions, Dialog } from '../../components/dialog.tsx';
+import type { Point } from '../../../shared/geometry/point.ts';
+import { barLengths } from '../../../shared/templates/sheet-title.ts';
+import { planTemplate } from '../../../shared/templates/template.ts';
+import { Dialog } from '../../components/dialog.tsx';
 import { ErrorState } from '../../components/error-state.tsx';
-import { SelectField } from '../../components/select-field.tsx';
-import { call } from '../../lib/call.ts';
+import { Loading } from '../../components/loading.tsx';
+import { isCallError } from '../../lib/call-error.ts';
 import { useUnits } from '../../lib/units.ts';
+import { usualChoices, wishOf, type Choices } from './choices.ts';
+import { MakePanel } from './make-panel.tsx';
+import { OptionFields } from './option-fields.tsx';
+import { PlanPanel } from './plan-panel.tsx';
+import { PrinterPanel } from './printer-panel.tsx';
+import { templatePlanQuery } from './templates.queries.ts';
 
 interface Props {
-  layout: { id: string; name: string; letter: string };
+  layout: { id: string; name: string; letter: string; frames: readonly { id: string; label: string }[] };
   /** Saves what is unsaved first, so that the paper shows what the wall shows; throws where it could not be saved. */
   ready: () => Promise<unknown>;
   onClose: () => void;
 }
 
-/** Makes the hanging template, 1:1, as a PDF to print and tape to the wall. */
+/** The hanging template, 1:1: chosen, looked at and made here. */
 export function TemplateDialog({ layout, ready, onClose }: Props) {
   const units = useUnits();
-  const [paper, setPaper] = useState<Paper>(units === 'in' ? 'letter' : 'a4');
-  const make = useMutation({
-    mutationFn: async () => {
-      await ready();
-      const pdf = (await call(templatesApi.pdf, { params: { layoutId: layout.id }, query: { paper } })) as Blob;
-      hand(pdf, `${layout.name} ${layout.letter} template.pdf`);
-    },
-  });
+  const [choices, setChoices] = useState<Choices>(() => usualChoices(units));
+  const [origin, setOrigin] = useState<Point | null>(null);
+  const wish = wishOf(choices);
+  const asked = useQuery({ ...templatePlanQuery(layout.id, wish ?? {}, ready), enabled: wish !== null });
+  const told = asked.data;
+  // A grid pulled by hand is laid here, by the same rules: the count follows the hand.
+  const input = told && origin ? { ...told.input, origin, orientation: told.plan.format.orientation } : told?.input;
+  const plan = input && origin ? planTemplate(input) : told?.plan;
+  const errors = Object.fromEntries(isCallError(asked.error) ? (asked.error.problem.fields ?? []).map(({ path, words }) => [path, words]) : []);
+  const toMake = wish && origin && plan ? { ...wish, originX: plan.origin.x, originY: plan.origin.y, orientation: plan.format.orientation } : wish;
+
   return (
-    <Dialog open onOpenChange={onClose} title="Hanging template" about="Everything the wall needs at full size: outlines, screw centres, datums and studs.">
-      <div className="grid gap-4">
-        <SelectField
-          label="Paper"
-          value={paper}
-          onChange={(event) => setPaper(event.target.value as Paper)}
-          options={papers.map((value) => ({ value, words: paperName(value) }))}
-        />
-        <p className="text-sm text-ink-700">
-          Print at actual size (100 %), not fitted to the page. Measure the printed bars before you tape anything, and look for cables and pipes before you drill.
-        </p>
-        {make.error ? <ErrorState error={make.error} onRetry={() => make.mutate()} /> : null}
-        {make.isSuccess ? <p role="status">The template is in your downloads.</p> : null}
+    <Dialog open onOpenChange={onClose} wide="all" title="Hanging template" about="Everything the wall needs at full size: outlines, screw centres, datums and studs.">
+      <div className="grid gap-6 lg:grid-cols-[22rem_minmax(0,1fr)] xl:grid-cols-[30rem_minmax(0,1fr)]">
+        <div className="grid content-start gap-4">
+          <OptionFields
+            choices={choices}
+            frames={layout.frames}
+            errors={errors}
+            onChange={(change) => {
+              setChoices((before) => ({ ...before, ...change }));
+              setOrigin(null);
+            }}
+          />
+          <PrinterPanel printerId={choices.printerId} onChoose={(printerId) => setChoices((before) => ({ ...before, printerId }))} bars={plan && input ? barLengths(plan.format, input) : null} />
+        </div>
+        <div className="grid min-w-0 content-start gap-4">
+          {asked.error ? <ErrorState error={asked.error} onRetry={() => void asked.refetch()} /> : null}
+          {input && plan ? (
+            <PlanPanel input={input} plan={plan} fewest={told!.plan} notes={told!.notes} pulled={origin !== null} busy={asked.isFetching} onPull={setOrigin} />
+          ) : asked.isPending && wish ? (
+            <Loading what="the sheets" />
+          ) : null}
+          <p className="text-sm text-ink-700">
+            Print at actual size (100 %), not fitted to the page. Measure the printed bars before you tape anything, and look for cables and pipes before you drill.
+          </p>
+          <MakePanel layout={layout} wish={asked.error ? null : toMake} ready={ready} onClose={onClose} />
+        </div>
       </div>
-      <Actions>
-        <Button onClick={onClose}>Close</Button>
-        <Button weight="primary" busy={make.isPending} onClick={() => make.mutate()}>
-          Make the template
-        </Button>
-      </Actions>
     </Dialog>
   );
-}
-
-/** Gives a file to the browser's downloads. */
-function hand(file: Blob, name: string): void {
-  const url = URL.createObjectURL(file);
-  const link = document.createElement('a');
-  link.href = url;
-  link.download = name;
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(url), 60_000);
 }
