@@ -73,6 +73,8 @@ export async function howFast(): Promise<string[]> {
     const held = Math.max(...strains.map((x) => x.longestMs));
     lines.push(`memory of the server: ${peak.restMb.toFixed(0)} MB before, ${peak.peakMb.toFixed(0)} MB at most`);
     lines.push(`event loop held up at most ${held.toFixed(0)} ms (goal: 50), 99 in 100 below ${Math.max(...strains.map((x) => x.most99Ms)).toFixed(0)} ms; at rest, on the machine as busy as it is, ${atRest.longestMs.toFixed(0)} and ${atRest.most99Ms.toFixed(0)} ms`);
+    const own = strains.flatMap((x) => x.ownMs ?? []);
+    if (own.length > 0) lines.push(`of that by the loop's own work at most ${Math.max(...own).toFixed(0)} ms at a time; the rest was waiting for a processor`);
     return lines;
   } finally {
     const ended = new Promise((r) => child.once('exit', r));

@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { mkdtempSync, rmSync } from 'node:fs';
+import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import type { AddressInfo } from 'node:net';
 import os from 'node:os';
 import path from 'node:path';
@@ -19,6 +19,11 @@ export interface Strain {
   /** Longest time that the event loop was held up, and what 99 in 100 stay below, ms. */
   longestMs: number;
   most99Ms: number;
+  /**
+   * The most that the loop's own thread computed between two ticks of 5 ms, ms: what it held up by itself, without the waits that
+   * other programs on the machine cost it. Null where the system does not tell (it is read from Linux's schedstat).
+   */
+  ownMs: number | null;
   /** Memory in use, MB: at the beginning, and at most (sampled every 10 ms). */
   restMb: number;
   peakMb: number;
@@ -51,19 +56,38 @@ const delay = monitorEventLoopDelay({ resolution: 5 });
 let restMb = 0;
 let peakMb = 0;
 let sampler: NodeJS.Timeout | undefined;
+let ticker: NodeJS.Timeout | undefined;
+let ownMs: number | null = null;
+
+/** Time that the main thread (its number is the process's) has computed, ms. */
+function computedMs(): number | null {
+  try {
+    return Number(readFileSync(`/proc/self/task/${process.pid}/schedstat`, 'utf8').split(' ')[0]) / 1e6;
+  } catch {
+    return null;
+  }
+}
 const mb = () => process.memoryUsage.rss() / 1e6;
 
 process.on('message', (message: 'begin' | 'end' | 'stop') => {
   if (message === 'begin') {
     restMb = peakMb = mb();
     sampler = setInterval(() => (peakMb = Math.max(peakMb, mb())), 10);
+    let before = computedMs();
+    ownMs = before === null ? null : 0;
+    ticker = setInterval(() => {
+      const now = computedMs();
+      if (now !== null && before !== null) ownMs = Math.max(ownMs ?? 0, now - before);
+      before = now;
+    }, 5);
     delay.reset();
     delay.enable();
     process.send?.({ began: true });
   } else if (message === 'end') {
     delay.disable();
     clearInterval(sampler);
-    const strain: Strain = { longestMs: delay.max / 1e6, most99Ms: delay.percentile(99) / 1e6, restMb, peakMb };
+    clearInterval(ticker);
+    const strain: Strain = { longestMs: delay.max / 1e6, most99Ms: delay.percentile(99) / 1e6, ownMs, restMb, peakMb };
     process.send?.({ strain });
   } else void stop();
 });
