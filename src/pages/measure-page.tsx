@@ -12,23 +12,29 @@ import { Page, Section } from '../components/page.tsx';
 import { TitleBlock } from '../components/title-block.tsx';
 import { WallDrawing } from '../features/drawing/wall-drawing.tsx';
 import { jobQuery } from '../features/jobs/jobs.queries.ts';
-import type { MarkDraft } from '../features/walls/marks-draft.ts';
 import { ObstructionFields } from '../features/walls/obstruction-fields.tsx';
+import { OutlineFields } from '../features/walls/outline-fields.tsx';
+import { PhotoList } from '../features/walls/photo-list.tsx';
 import { PhotoUpload } from '../features/walls/photo-upload.tsx';
 import { ShapeFields } from '../features/walls/shape-fields.tsx';
 import { SheetNotices } from '../features/walls/sheet-notices.tsx';
 import { StraightenPanel } from '../features/walls/straighten-panel.tsx';
 import { StudFields } from '../features/walls/stud-fields.tsx';
+import { usePhotoDraft } from '../features/walls/use-photo-draft.ts';
 import { useWallDraft } from '../features/walls/use-wall-draft.ts';
+import { useWallTools } from '../features/walls/use-wall-tools.ts';
 import { drawable } from '../features/walls/wall-draft.ts';
 import { WallFacts } from '../features/walls/wall-facts.tsx';
-import { WallGrid, WallLegend } from '../features/walls/wall-grid.tsx';
+import { UndoButtons } from '../features/walls/wall-toolbar.tsx';
+import { WallView } from '../features/walls/wall-view.tsx';
 import { constructionWords } from '../features/walls/wall-words.ts';
 import { useRemovePhoto, wallQuery } from '../features/walls/walls.queries.ts';
+import { ZoneFields } from '../features/walls/zone-fields.tsx';
 import { keys } from '../lib/keys.ts';
 import { usePageTitle } from '../lib/page-title.ts';
 import { paths } from '../lib/paths.ts';
 import { useMay } from '../lib/session.ts';
+import { useUndoKeys } from '../lib/use-undo-keys.ts';
 
 /** The site measure of one wall. */
 export function MeasurePage() {
@@ -50,9 +56,12 @@ function Measure({ wall }: { wall: Wall }) {
   const mayChange = useMay('change jobs');
   const sheet = useWallDraft(wall);
   const [view, setView] = useState<View>(() => firstView(wall, mayChange));
-  const [moved, setMoved] = useState<{ photoId: string; marks: MarkDraft[] } | null>(null);
-  const movedHere = moved && moved.photoId === wall.photo?.id ? moved.marks : null;
+  const photoSheet = usePhotoDraft(wall.photo);
   const shown = drawable(sheet.draft, wall);
+  const tools = useWallTools(sheet, shown);
+  // What is undone is what is on show: the marks of the photo, or the wall.
+  const inHand = view === 'marks' ? photoSheet : sheet;
+  useUndoKeys(inHand.undo, inHand.redo, mayChange);
   const open = shown.studs.filter((s) => !isConfirmed(s)).length;
   const takeTheirs = () => {
     sheet.takeTheirs();
@@ -83,25 +92,34 @@ function Measure({ wall }: { wall: Wall }) {
         }
       />
       {mayChange ? <SheetNotices sheet={sheet} onTakeTheirs={takeTheirs} /> : null}
-      <Section title={view === 'marks' ? 'Straighten the photo' : 'The wall'} action={mayChange ? <Views wall={wall} view={view} onView={setView} /> : null}>
-        {view === 'photo' ? <PhotoUpload wall={wall} onUploaded={() => setView('marks')} onWithout={() => setView('wall')} /> : null}
-        {view === 'marks' && wall.photo ? (
-          <StraightenPanel
-            key={wall.photo.id}
-            wall={wall}
-            photo={wall.photo}
-            moved={movedHere}
-            onMoved={(marks) => setMoved(marks && wall.photo ? { photoId: wall.photo.id, marks } : null)}
-            onStraightened={() => setView('wall')}
-          />
+      <Section
+        title={view === 'marks' ? 'Straighten the photo' : 'The wall'}
+        action={
+          mayChange ? (
+            <div className="flex flex-wrap items-center gap-2">
+              <UndoButtons of={inHand} />
+              <Views wall={wall} view={view} onView={setView} />
+            </div>
+          ) : null
+        }
+      >
+        {view === 'photo' ? (
+          <div className="grid gap-6">
+            <PhotoUpload wall={wall} onUploaded={() => setView('marks')} onWithout={() => setView('wall')} />
+            {wall.photo ? <PhotoList wall={wall} onChosen={() => setView('wall')} /> : null}
+          </div>
+        ) : null}
+        {view === 'marks' && wall.photo && photoSheet.draft ? (
+          <StraightenPanel key={wall.photo.id} wall={shown} photo={wall.photo} sheet={photoSheet} draft={photoSheet.draft} onStraightened={() => setView('wall')} />
         ) : null}
         {view === 'wall' ? (
-          <figure>
-            <WallDrawing wall={shown} elevation={wall.photo?.elevation ?? null} siteMarks label={`${wall.name} from the front, with studs and obstructions`} className="max-h-[75dvh] w-full">
-              <WallGrid widthMm={shown.widthMm} heightMm={shown.heightMm} />
-            </WallDrawing>
-            <WallLegend unconfirmed={open > 0} />
-          </figure>
+          <WallView wall={shown} photo={wall.photo} tools={mayChange ? tools : null} unconfirmed={open > 0}>
+            {(over, className) => (
+              <WallDrawing wall={shown} elevation={wall.photo?.elevation ?? null} siteMarks label={`${wall.name} from the front, with studs and obstructions`} className={className}>
+                {over}
+              </WallDrawing>
+            )}
+          </WallView>
         ) : null}
       </Section>
       {mayChange ? (
@@ -109,19 +127,24 @@ function Measure({ wall }: { wall: Wall }) {
           <div className="grid items-start gap-6 lg:grid-cols-[minmax(0,2fr)_minmax(0,3fr)]">
             <Section title="Size and make">
               <ShapeFields draft={sheet.draft} errors={sheet.errors} onChange={sheet.change} />
+              <h3 className="mt-6 mb-2 font-semibold text-ink-900">Outline</h3>
+              <OutlineFields draft={sheet.draft} errors={sheet.errors} onChange={sheet.change} />
             </Section>
             <Section title="Studs">
-              <StudFields draft={sheet.draft} errors={sheet.errors} onChange={(studs) => sheet.change({ studs })} />
+              <StudFields draft={sheet.draft} errors={sheet.errors} onChange={(studs, deed) => sheet.change({ studs }, deed)} />
             </Section>
           </div>
           <Section title="Obstructions">
-            <ObstructionFields obstructions={sheet.draft.obstructions} errors={sheet.errors} onChange={(obstructions) => sheet.change({ obstructions })} />
+            <ObstructionFields obstructions={sheet.draft.obstructions} errors={sheet.errors} onChange={(obstructions, deed) => sheet.change({ obstructions }, deed)} />
+          </Section>
+          <Section title="Where people are">
+            <ZoneFields zones={sheet.draft.zones} errors={sheet.errors} onChange={(zones, deed) => sheet.change({ zones }, deed)} />
           </Section>
         </>
       ) : (
         <WallFacts wall={wall} />
       )}
-      <LeaveGuard unsaved={sheet.changed || movedHere !== null} />
+      <LeaveGuard unsaved={sheet.changed || photoSheet.changed} />
     </Page>
   );
 }

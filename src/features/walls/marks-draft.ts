@@ -1,7 +1,5 @@
-import { elevationPlan } from '../../../shared/walls/elevation-plan.ts';
 import type { Point } from '../../../shared/walls/homography.ts';
-import { marksTrouble, type Mark, type MarksTrouble } from '../../../shared/walls/marks.ts';
-import type { Photo, Wall } from '../../../shared/walls/wall.ts';
+import type { Photo } from '../../../shared/walls/wall.ts';
 import type { Typed } from './wall-draft.ts';
 
 /** A mark while it is set: its place on the photo (px), and on the wall as far as typed (mm). */
@@ -58,22 +56,4 @@ export function inThisOrder(marks: readonly MarkDraft[], order: readonly number[
 export function onPhoto(px: Point, photo: { widthPx: number; heightPx: number }): Point {
   const hold = (v: number, most: number) => Math.round(Math.min(Math.max(v, 0), most) * 10) / 10;
   return { x: hold(px.x, photo.widthPx), y: hold(px.y, photo.heightPx) };
-}
-
-export type Judged =
-  | { state: 'unfinished' }
-  | { state: 'trouble'; trouble: Pick<MarksTrouble, 'words' | 'order' | 'which'> }
-  | { state: 'fit'; marks: Mark[]; mmPerPx: number };
-
-/** Whether the marks can be used as they stand, by the same rules as the server's. */
-export function judge(drafts: readonly MarkDraft[], photo: Photo, wall: Pick<Wall, 'widthMm' | 'heightMm'>): Judged {
-  const marks = drafts.flatMap(({ px, xMm, yMm }): Mark[] =>
-    xMm === null || yMm === null || !Number.isFinite(xMm) || !Number.isFinite(yMm) ? [] : [{ px, mm: { x: xMm, y: yMm } }],
-  );
-  if (marks.length < drafts.length) return { state: 'unfinished' };
-  const trouble = marksTrouble(marks, photo);
-  if (trouble) return { state: 'trouble', trouble };
-  const plan = elevationPlan(marks, photo, wall);
-  if (!plan) return { state: 'trouble', trouble: { which: [], words: 'By these positions the photo shows nothing of the wall. Check them, and the wall’s width and height.' } };
-  return { state: 'fit', marks, mmPerPx: 1 / plan.pxPerMm };
 }

@@ -1,20 +1,22 @@
 import { Trash2 } from 'lucide-react';
 import { useState } from 'react';
 import { isConfirmed, Stud } from '../../../shared/walls/wall.ts';
-import { laidBySpacing, studFaceMm, studsBySpacing, usualSpacings, usualUncertaintyMm } from '../../../shared/walls/studs.ts';
+import { missingOpeningCentres } from '../../../shared/walls/opening-studs.ts';
+import { inOrder, laidBySpacing, studFaceMm, studsBySpacing, usualSpacings, usualUncertaintyMm } from '../../../shared/walls/studs.ts';
 import { Button } from '../../components/button.tsx';
 import { LengthField } from '../../components/length-field.tsx';
 import { SelectField } from '../../components/select-field.tsx';
 import { Table, Td, Th } from '../../components/table.tsx';
 import { newId } from '../../lib/new-id.ts';
 import { useUnits } from '../../lib/units.ts';
-import type { DraftErrors, StudDraft, Typed, WallDraft } from './wall-draft.ts';
+import type { Deed } from './use-wall-draft.ts';
+import { readOutline, type DraftErrors, type StudDraft, type Typed, type WallDraft } from './wall-draft.ts';
 import { foundByWords, optionsOf } from './wall-words.ts';
 
 interface Props {
   draft: WallDraft;
   errors: DraftErrors;
-  onChange: (studs: StudDraft[]) => void;
+  onChange: (studs: StudDraft[], deed?: Deed) => void;
 }
 
 const ownSpacing = 'own';
@@ -27,8 +29,17 @@ export function StudFields({ draft, errors, onChange }: Props) {
     // An uncertainty that was only the usual one for the way it was found follows the new way.
     set(stud.id, { foundBy: by, uncertaintyMm: stud.uncertaintyMm === usualUncertaintyMm[stud.foundBy] ? usualUncertaintyMm[by] : stud.uncertaintyMm });
   const faceMm = draft.construction === 'steel studs' ? studFaceMm.steel : studFaceMm.wood;
-  const addOne = () => onChange([...studs, { id: newId(), xMm: null, widthMm: faceMm, foundBy: 'probe', uncertaintyMm: usualUncertaintyMm.probe }]);
+  const addOne = () => onChange([...studs, { id: newId(), xMm: null, widthMm: faceMm, foundBy: 'probe', uncertaintyMm: usualUncertaintyMm.probe }], { words: 'Stud added' });
   const open = studs.filter((s) => !isConfirmed(s)).length;
+  const read = studs.flatMap((s) => { const one = Stud.safeParse(s); return one.success ? [one.data] : []; });
+  const openings = draft.obstructions.flatMap((o) => { const outlineMm = o.kind === 'opening' ? readOutline(o) : null; return outlineMm ? [{ outlineMm }] : []; });
+  const addBesideOpenings = () => {
+    const all = openings.reduce<Stud[]>(
+      (known, opening) => [...known, ...missingOpeningCentres(opening, known, faceMm, draft.widthMm ?? 0).map((xMm): Stud => ({ id: newId(), xMm, widthMm: faceMm, foundBy: 'spacing', uncertaintyMm: usualUncertaintyMm.spacing }))],
+      read,
+    );
+    onChange([...inOrder(all), ...studs.filter((s) => !read.some((r) => r.id === s.id))], { words: `${all.length - read.length} studs set beside openings` });
+  };
 
   return (
     <div className="grid gap-4">
@@ -67,7 +78,7 @@ export function StudFields({ draft, errors, onChange }: Props) {
                   <Td>{field('uncertaintyMm', 'off by at most')}</Td>
                   <Td>{field('widthMm', 'face width')}</Td>
                   <Td>
-                    <Button weight="quiet" aria-label={`Take out stud ${i + 1}`} onClick={() => onChange(studs.filter((s) => s.id !== stud.id))}>
+                    <Button weight="quiet" aria-label={`Take out stud ${i + 1}`} onClick={() => onChange(studs.filter((s) => s.id !== stud.id), { words: `Stud ${i + 1} taken out` })}>
                       <Trash2 aria-hidden="true" className="size-4" />
                     </Button>
                   </Td>
@@ -81,6 +92,9 @@ export function StudFields({ draft, errors, onChange }: Props) {
       )}
       <div className="flex flex-wrap items-center gap-3">
         <Button onClick={addOne}>Add a stud</Button>
+        {openings.length > 0 ? (
+          <Button onClick={addBesideOpenings}>Add jack and king studs beside openings</Button>
+        ) : null}
         {open > 0 ? (
           <p className="text-sm text-ink-700">
             <span aria-hidden="true" className="font-bold text-chalk-700">?</span> {open === 1 ? 'One stud is' : `${open} studs are`} unconfirmed. Probe before you load one: a pilot hole behind where the frame hides it, or a magnet on the board’s screws.
@@ -91,7 +105,7 @@ export function StudFields({ draft, errors, onChange }: Props) {
   );
 }
 
-function BySpacing({ draft, faceMm, onLaid }: { draft: WallDraft; faceMm: number; onLaid: (studs: StudDraft[]) => void }) {
+function BySpacing({ draft, faceMm, onLaid }: { draft: WallDraft; faceMm: number; onLaid: Props['onChange'] }) {
   const units = useUnits();
   const [firstMm, setFirst] = useState<Typed>(null);
   const [chosen, setChosen] = useState(String(units === 'in' ? usualSpacings[0].mm : usualSpacings[2].mm));
@@ -104,7 +118,7 @@ function BySpacing({ draft, faceMm, onLaid }: { draft: WallDraft; faceMm: number
     if (!ready) return;
     const whole = draft.studs.flatMap((s) => { const read = Stud.safeParse(s); return read.success ? [read.data] : []; });
     const laid = laidBySpacing(whole, studsBySpacing(firstMm, spacingMm, draft.widthMm!), faceMm, newId);
-    onLaid(laid);
+    onLaid(laid, { words: `${laid.length} studs laid out` });
     setSaid(`${laid.length} studs on the wall.`);
   };
   return (

@@ -1,16 +1,18 @@
 import { describe, expect, it } from 'vitest';
 import type { Photo } from '../../../shared/walls/wall.ts';
-import { inThisOrder, judge, marksOf, onPhoto, rectangleOf, withRectangle } from '../../../src/features/walls/marks-draft.ts';
+import { inThisOrder, marksOf, onPhoto, rectangleOf, withRectangle, type MarkDraft } from '../../../src/features/walls/marks-draft.ts';
+import { judge as judgeAll } from '../../../src/features/walls/photo-draft.ts';
 
 const photo: Photo = { id: 'p', widthPx: 4000, heightPx: 3000, previewUrl: '/p', marks: null, elevation: null, createdAt: '2026-03-02T09:00:00Z' };
 const wall = { widthMm: 3000, heightMm: 2400 };
+const judge = (marks: MarkDraft[], of: Photo, on: typeof wall) => judgeAll({ marks, straightEdges: [], lines: [], lengths: [] }, of, on);
 const tape = { leftMm: 300, bottomMm: 450, widthMm: 2400, heightMm: 1500 };
 
 describe('marks being set on a new photo', () => {
   it('begin well apart with no places, and cannot be used yet', () => {
     const marks = marksOf(photo);
     expect(marks).toHaveLength(4);
-    expect(judge(marks, photo, wall)).toEqual({ state: 'unfinished' });
+    expect(judge(marks, photo, wall)).toMatchObject({ state: 'unfinished' });
   });
 
   it('take their places from the taped rectangle, side by side as it is typed', () => {
@@ -32,7 +34,7 @@ describe('marks being set on a new photo', () => {
 
   it('cannot be used while a length cannot be read', () => {
     const marks = withRectangle(marksOf(photo), { ...tape, heightMm: Number.NaN });
-    expect(judge(marks, photo, wall)).toEqual({ state: 'unfinished' });
+    expect(judge(marks, photo, wall)).toMatchObject({ state: 'unfinished' });
   });
 
   it('are held on the photo', () => {

@@ -10,7 +10,7 @@ const wall: Wall = {
     { id: uuid(4), kind: 'outlet', name: '', outlineMm: [[300, 250], [370, 250], [370, 364], [300, 364]], clearanceMm: 50 },
     { id: uuid(5), kind: 'trim', name: 'Stair string', outlineMm: [[0, 0], [900, 0], [0, 700]], clearanceMm: 10 },
   ],
-  zones: [], photo: null,
+  outlineMm: null, zones: [], photo: null,
 };
 
 describe('a wall’s sheet', () => {
@@ -45,5 +45,32 @@ describe('a wall’s sheet', () => {
     draft.studs.push({ id: uuid(6), xMm: null, widthMm: 38.1, foundBy: 'probe', uncertaintyMm: 3 });
     draft.obstructions[0] = { ...draft.obstructions[0]!, leftMm: Number.NaN };
     expect(drawable(draft, wall)).toMatchObject({ widthMm: 3600, studs: wall.studs, obstructions: [wall.obstructions[1]] });
+  });
+});
+
+describe('a wall under a sloped ceiling', () => {
+  const sloped = { ...wall, outlineMm: [[0, 0], [3600, 0], [3600, 2600], [1800, 2600], [0, 1300]] as [number, number][] };
+
+  it('keeps its outline as it is', () => {
+    expect(isChanged(draftOf(sloped), sloped)).toBe(false);
+    expect(bodyOf(draftOf(sloped))).toEqual({ body: expect.objectContaining({ outlineMm: sloped.outlineMm }) });
+    expect(drawable(draftOf(sloped), sloped)).toEqual(sloped);
+  });
+
+  it('is not sent with an outline that crosses itself or reaches past width and height, and says where', () => {
+    const crossed = draftOf(sloped);
+    crossed.outline = [0, 2, 1, 3].map((i) => ({ xMm: [0, 3600, 3600, 0][i]!, yMm: [0, 0, 2600, 2600][i]! }));
+    expect(bodyOf(crossed)).toEqual({ errors: { outline: expect.stringMatching(/cross/) } });
+    const wide = draftOf(sloped);
+    wide.outline![1] = { xMm: 3700, yMm: 0 };
+    expect(bodyOf(wide)).toEqual({ errors: { 'outline.1.xMm': expect.stringMatching(/past the wall’s width/) } });
+  });
+});
+
+describe('where people are', () => {
+  it('runs from left to right', () => {
+    const draft = draftOf(wall);
+    draft.zones = [{ id: uuid(7), kind: 'bed', fromMm: 2000, toMm: 500 }];
+    expect(bodyOf(draft)).toEqual({ errors: { 'zones.0.toMm': expect.stringMatching(/right/) } });
   });
 });
