@@ -29,7 +29,7 @@ export class PdfContent {
 
   async draw(items: readonly Primitive[]): Promise<void> {
     for (const item of items) {
-      if (item.kind === 'text') await this.write(item);
+      if (item.kind === 'text') this.write(item, this.type.settled(item.text, item.weight) ?? (await this.type.runs(item.text, item.weight)));
       else if (item.kind === 'clip') {
         const { x, y, width, height } = item.rect;
         const before = { ...this.pen };
@@ -95,8 +95,7 @@ export class PdfContent {
     ].join(' ');
   }
 
-  private async write(item: Text): Promise<void> {
-    const runs = await this.type.runs(item.text, item.weight);
+  private write(item: Text, runs: readonly Run[]): void {
     const widthEm = runs.reduce((sum, run) => sum + run.widthEm, 0);
     if (widthEm === 0) return;
     const sizeMm = item.maxWidthMm === undefined ? item.sizeMm : Math.min(item.sizeMm, item.maxWidthMm / widthEm);

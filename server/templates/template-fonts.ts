@@ -21,6 +21,7 @@ interface Face {
   has: (codePoint: number) => boolean;
   bytes: Uint8Array;
   embedded: Promise<PDFFont> | null;
+  font: PDFFont | null;
 }
 
 const boxEm = 0.7;
@@ -29,10 +30,17 @@ const boxEm = 0.7;
 export class TemplateFonts {
   private readonly faces = new Map<string, Promise<Face>>();
   /** A template says the same things on every sheet. */
+  private readonly chosen = new Map<string, Face | null>();
   private readonly known = new Map<string, Run[]>();
+  private readonly signs = new Map<PDFFont, Map<string, { hex: string; widthEm: number }>>();
 
   constructor(private readonly document: PDFDocument) {
     document.registerFontkit(fontkit);
+  }
+
+  /** Runs of a text that was split before, without a wait. */
+  settled(text: string, weight: Weight): Run[] | undefined {
+    return this.known.get(`${weight} ${text}`);
   }
 
   /** Splits a text into runs that can be drawn; signs without a glyph anywhere become boxes, invisible ones are dropped. */
@@ -48,13 +56,15 @@ export class TemplateFonts {
     let pending: { face: Face; text: string } | null = null;
     const flush = async () => {
       if (pending === null) return;
-      const font = await this.embed(pending.face);
-      runs.push({ font, hex: font.encodeText(pending.text).toString(), widthEm: font.widthOfTextAtSize(pending.text, 1) });
+      const font = pending.face.font ?? (pending.face.font = await this.embed(pending.face));
+      runs.push(this.set(font, pending.text));
       pending = null;
     };
     for (const sign of [...text.normalize('NFC')].flatMap((s) => [...(plain[s] ?? s)])) {
       if (/[\p{Cc}\p{Cf}\p{Mn}\p{Cs}]/u.test(sign)) continue;
-      const face = await this.faceFor(sign.codePointAt(0)!, weight);
+      const place = `${weight} ${sign}`;
+      let face = this.chosen.get(place);
+      if (face === undefined) this.chosen.set(place, (face = await this.faceFor(sign.codePointAt(0)!, weight)));
       if (face === null) {
         await flush();
         runs.push({ font: null, widthEm: boxEm });
@@ -67,6 +77,24 @@ export class TemplateFonts {
     }
     await flush();
     return runs;
+  }
+
+  /**
+   * Sign by sign, each worked out once: shaping whole strings took most of the drawing's time, and without kerning in the
+   * file it places nothing otherwise.
+   */
+  private set(font: PDFFont, text: string): Run {
+    let signs = this.signs.get(font);
+    if (!signs) this.signs.set(font, (signs = new Map()));
+    let hex = '';
+    let widthEm = 0;
+    for (const sign of text) {
+      let one = signs.get(sign);
+      if (!one) signs.set(sign, (one = { hex: font.encodeText(sign).asString(), widthEm: font.widthOfTextAtSize(sign, 1) }));
+      hex += one.hex;
+      widthEm += one.widthEm;
+    }
+    return { font, hex: `<${hex}>`, widthEm };
   }
 
   private async faceFor(codePoint: number, weight: Weight): Promise<Face | null> {
@@ -98,5 +126,5 @@ async function readFace(name: string): Promise<Face> {
   const home = path.dirname(createRequire(import.meta.url).resolve('@fontsource/nunito-sans/package.json'));
   const bytes = await readFile(path.join(home, 'files', name));
   const signs = new Set(fontkit.create(bytes).characterSet);
-  return { bytes, embedded: null, has: (codePoint) => signs.has(codePoint) };
+  return { bytes, embedded: null, font: null, has: (codePoint) => signs.has(codePoint) };
 }

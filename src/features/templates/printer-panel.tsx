@@ -13,8 +13,8 @@ import { printersQuery, useAddPrinter, useMeasurePrinter } from './templates.que
 interface Props {
   printerId: string;
   onChoose: (printerId: string) => void;
-  /** What the two bars of a sheet say, mm. */
-  bars: { across: number; up: number } | null;
+  /** Which page is to be measured, and what its two bars say, mm. */
+  bars: { page: 'a sheet' | 'the front page'; across: number; up: number } | null;
 }
 
 const rules = [
@@ -59,7 +59,7 @@ export function PrinterPanel({ printerId, onChoose, bars }: Props) {
             });
           }}
         >
-          <p className="text-sm text-ink-700">Print one sheet for this printer with these choices, lay a steel rule on both its bars, and write what you read.</p>
+          <p className="text-sm text-ink-700">Print {bars.page} for this printer with these choices, lay a steel rule on both its bars, and write what you read. Each bar says how long it should be: check that it is the one asked for.</p>
           <div className="grid grid-cols-2 gap-3">
             <LengthField label={`Bar across, ${formatLength(bars.across, units)}`} value={across} onChange={setAcross} />
             <LengthField label={`Bar up, ${formatLength(bars.up, units)}`} value={up} onChange={setUp} />

@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { Point } from '../../../shared/geometry/point.ts';
+import { frontFormat } from '../../../shared/templates/front-pages.ts';
 import { barLengths } from '../../../shared/templates/sheet-title.ts';
 import { planTemplate } from '../../../shared/templates/template.ts';
 import { Dialog } from '../../components/dialog.tsx';
@@ -33,6 +34,9 @@ export function TemplateDialog({ layout, ready, onClose }: Props) {
   // A grid pulled by hand is laid here, by the same rules: the count follows the hand.
   const input = told && origin ? { ...told.input, origin, orientation: told.plan.format.orientation } : told?.input;
   const plan = input && origin ? planTemplate(input) : told?.plan;
+  // The front page is the cheapest to prove, but where sheets go to a larger printer it comes from another.
+  const front = input && frontFormat(input);
+  const barPage = front && front.paper === plan?.format.paper ? front : plan?.format;
   const errors = Object.fromEntries(isCallError(asked.error) ? (asked.error.problem.fields ?? []).map(({ path, words }) => [path, words]) : []);
   const toMake = wish && origin && plan ? { ...wish, originX: plan.origin.x, originY: plan.origin.y, orientation: plan.format.orientation } : wish;
 
@@ -49,7 +53,7 @@ export function TemplateDialog({ layout, ready, onClose }: Props) {
               setOrigin(null);
             }}
           />
-          <PrinterPanel printerId={choices.printerId} onChoose={(printerId) => setChoices((before) => ({ ...before, printerId }))} bars={plan && input ? barLengths(plan.format, input) : null} />
+          <PrinterPanel printerId={choices.printerId} onChoose={(printerId) => setChoices((before) => ({ ...before, printerId }))} bars={input && plan && barPage ? { page: barPage === plan.format ? 'a sheet' : 'the front page', ...barLengths(barPage, input) } : null} />
         </div>
         <div className="grid min-w-0 content-start gap-4">
           {asked.error ? <ErrorState error={asked.error} onRetry={() => void asked.refetch()} /> : null}
