@@ -48,3 +48,36 @@ export async function straighten(page: Page): Promise<void> {
   await page.getByRole('button', { name: 'Straighten the photo' }).click();
   await expect(page.getByRole('img', { name: /from the front/ })).toBeVisible({ timeout: 60_000 });
 }
+
+/** A target of a scene: where the photo shows it (px) and where it is on the wall (mm). */
+export interface Target {
+  px: [number, number];
+  mm: [number, number];
+}
+
+/** The scene's targets, which no mark need know. */
+export function targetsOf(scene = calibrationScene): Target[] {
+  const { marks } = JSON.parse(readFileSync(`${scene}.json`, 'utf8')) as { marks: { kind: string; pixel: [number, number]; wallMm: [number, number] }[] };
+  return marks.filter((m) => m.kind !== 'tape').map(({ pixel, wallMm }) => ({ px: pixel, mm: wallMm }));
+}
+
+/** Adds a mark and types all of it: where the photo shows it, and where it is on the wall. */
+export async function typeMark(page: Page, number: number, { px, mm }: Target): Promise<void> {
+  await page.getByRole('button', { name: 'Add a mark' }).click();
+  const across = page.getByLabel(`Mark ${number} across the photo`);
+  if (!(await across.isVisible())) await page.getByText('Type where the marks are on the photo').click();
+  await across.fill(px[0].toFixed(1));
+  await page.getByLabel(`Mark ${number} down the photo`).fill(px[1].toFixed(1));
+  await page.getByLabel(`Mark ${number} from the left`).fill(`${mm[0]} mm`);
+  await page.getByLabel(`Mark ${number} above the floor`).fill(`${mm[1]} mm`);
+}
+
+/** Where a place on the wall is on the screen, while a tool is in hand and the whole wall is shown. */
+export async function onElevation(page: Page, wall: { widthMm: number; heightMm: number }, xMm: number, yMm: number): Promise<{ x: number; y: number }> {
+  const drawing = page.locator('[data-wall-board] svg');
+  await drawing.scrollIntoViewIfNeeded();
+  const box = (await drawing.boundingBox())!;
+  const margin = Math.max(wall.widthMm, wall.heightMm) * 0.01;
+  const scale = Math.min(box.width / (wall.widthMm + 2 * margin), box.height / (wall.heightMm + 2 * margin));
+  return { x: box.x + box.width / 2 + (xMm - wall.widthMm / 2) * scale, y: box.y + box.height / 2 - (yMm - wall.heightMm / 2) * scale };
+}

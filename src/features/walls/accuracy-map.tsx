@@ -5,9 +5,9 @@ type Grid = FitReport['expectedErrorMm']['grid'];
 /** Bounds of the tints, mm, and the look of each, from true to poor. */
 const bands = [
   { upTo: 1, look: 'fill-sage-600/20', swatch: 'bg-sage-600/20' },
-  { upTo: 2, look: 'fill-sage-600/45', swatch: 'bg-sage-600/45' },
+  { upTo: 2, look: 'fill-sage-600/35', swatch: 'bg-sage-600/35' },
   { upTo: 3, look: 'fill-ochre-600/25', swatch: 'bg-ochre-600/25' },
-  { upTo: 5, look: 'fill-ochre-600/50', swatch: 'bg-ochre-600/50' },
+  { upTo: 5, look: 'fill-ochre-600/40', swatch: 'bg-ochre-600/40' },
   { upTo: 10, look: 'fill-madder-600/35', swatch: 'bg-madder-600/35' },
   { upTo: Infinity, look: 'fill-madder-600/60', swatch: 'bg-madder-600/60' },
 ] as const;
@@ -21,7 +21,9 @@ export function AccuracyMap({ grid }: { grid: Grid }) {
   const top = bottomMm + (rows - 1) * stepYMm;
   const everyX = Math.max(1, Math.ceil(columns / 7));
   const everyY = Math.max(1, Math.ceil(rows / 6));
-  const size = Math.min(stepXMm * everyX * 0.28, stepYMm * everyY * 0.5);
+  const size = Math.min(stepXMm * everyX * 0.28, Math.max(columns * stepXMm, rows * stepYMm) * 0.026);
+  // A figure at the rim stands within it.
+  const within = (v: number, low: number, high: number, room: number) => Math.min(Math.max(v, low + room), high - room);
   const points = values.flatMap((v, i) => (v === null ? [] : [{ v, column: i % columns, row: Math.floor(i / columns) }]));
   return (
     <g aria-hidden="true" data-accuracy-map>
@@ -35,7 +37,7 @@ export function AccuracyMap({ grid }: { grid: Grid }) {
       })}
       {points.map(({ v, column, row }) =>
         column % everyX === Math.floor(everyX / 2) && row % everyY === Math.floor(everyY / 2) ? (
-          <text key={`${column} ${row}`} x={leftMm + column * stepXMm} y={-(bottomMm + row * stepYMm)} fontSize={size} strokeWidth={size / 4} textAnchor="middle" dominantBaseline="central" className="fill-ink-900 stroke-white font-bold tabular-nums [paint-order:stroke]">
+          <text key={`${column} ${row}`} x={within(leftMm + column * stepXMm, leftMm, right, size * 1.4)} y={-within(bottomMm + row * stepYMm, bottomMm, top, size)} fontSize={size} strokeWidth={size / 4} textAnchor="middle" dominantBaseline="central" className="fill-ink-900 stroke-white font-bold tabular-nums [paint-order:stroke]">
             {v.toFixed(1)}
           </text>
         ) : null,

@@ -24,6 +24,7 @@ export function CornerFields({ of, corners, errors, path, onChange }: Props) {
   };
   return (
     <div className="grid gap-2">
+      <p aria-hidden="true" className="text-sm font-semibold text-ink-700">Corners of {of}, going round</p>
       <Table caption={`Corners of ${of}, going round`}>
         <thead>
           <tr>

@@ -48,8 +48,6 @@ export function MarkPositions({ marks, photo, offBy, onChange }: Props) {
             <Th>From the left</Th>
             <Th>Above the floor</Th>
             <Th figure>Off by</Th>
-            <Th>Across the photo, px</Th>
-            <Th>Down, px</Th>
             <Th>
               <span className="sr-only">Take out</span>
             </Th>
@@ -61,20 +59,14 @@ export function MarkPositions({ marks, photo, offBy, onChange }: Props) {
               <Th scope="row">
                 {i + 1} <span className="block text-sm font-normal text-ink-700">{points ? cornerNames[i] : null}</span>
               </Th>
-              <Td className="min-w-28">
+              <Td className="min-w-24">
                 <LengthField className="[&>label]:sr-only" label={`Mark ${i + 1} from the left`} value={mark.xMm} onChange={(xMm) => setMark(i, { xMm }, 'x')} />
               </Td>
-              <Td className="min-w-28">
+              <Td className="min-w-24">
                 <LengthField className="[&>label]:sr-only" label={`Mark ${i + 1} above the floor`} value={mark.yMm} onChange={(yMm) => setMark(i, { yMm }, 'y')} />
               </Td>
               <Td figure className="whitespace-nowrap">
                 {offBy[i] ?? '–'}
-              </Td>
-              <Td>
-                <PxField label={`Mark ${i + 1} across the photo`} value={mark.px.x} most={photo.widthPx} onChange={(x) => setMark(i, { px: { ...mark.px, x } }, 'px x')} />
-              </Td>
-              <Td>
-                <PxField label={`Mark ${i + 1} down the photo`} value={mark.px.y} most={photo.heightPx} onChange={(y) => setMark(i, { px: { ...mark.px, y } }, 'px y')} />
               </Td>
               <Td>
                 {marks.length > 4 ? (
@@ -87,6 +79,31 @@ export function MarkPositions({ marks, photo, offBy, onChange }: Props) {
           ))}
         </tbody>
       </Table>
+      <details>
+        <summary className="min-h-8 cursor-pointer py-1 text-chalk-600 underline underline-offset-4">Type where the marks are on the photo</summary>
+        <Table caption="Places of the marks on the photo, px" className="mt-2">
+          <thead>
+            <tr>
+              <Th>Mark</Th>
+              <Th>Across, px</Th>
+              <Th>Down, px</Th>
+            </tr>
+          </thead>
+          <tbody>
+            {marks.map((mark, i) => (
+              <tr key={i}>
+                <Th scope="row">{i + 1}</Th>
+                <Td>
+                  <PxField label={`Mark ${i + 1} across the photo`} value={mark.px.x} most={photo.widthPx} onChange={(x) => setMark(i, { px: { ...mark.px, x } }, 'px x')} />
+                </Td>
+                <Td>
+                  <PxField label={`Mark ${i + 1} down the photo`} value={mark.px.y} most={photo.heightPx} onChange={(y) => setMark(i, { px: { ...mark.px, y } }, 'px y')} />
+                </Td>
+              </tr>
+            ))}
+          </tbody>
+        </Table>
+      </details>
     </div>
   );
 }

@@ -17,6 +17,7 @@ export function PhotoUpload({ wall, onUploaded, onWithout }: { wall: Wall; onUpl
   const [share, setShare] = useState(0);
   const [over, setOver] = useState(false);
   const [refused, setRefused] = useState<string | null>(null);
+  const [sent, setSent] = useState<File | null>(null);
   const upload = useUploadPhoto(wall);
 
   const send = (file: File | undefined) => {
@@ -26,6 +27,7 @@ export function PhotoUpload({ wall, onUploaded, onWithout }: { wall: Wall; onUpl
     const controller = new AbortController();
     calledOff.current = controller;
     setShare(0);
+    setSent(file);
     upload.mutate({ file, signal: controller.signal, onProgress: setShare }, { onSuccess: onUploaded });
   };
   const drop = (event: DragEvent) => {
@@ -94,7 +96,7 @@ export function PhotoUpload({ wall, onUploaded, onWithout }: { wall: Wall; onUpl
           {refused}
         </Notice>
       ) : null}
-      {upload.error ? <ErrorState error={upload.error} /> : null}
+      {upload.error ? <ErrorState error={upload.error} onRetry={sent ? () => send(sent) : undefined} /> : null}
     </div>
   );
 }

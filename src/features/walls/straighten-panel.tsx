@@ -58,7 +58,7 @@ export function StraightenPanel({ wall, photo, sheet, draft, onStraightened }: P
   };
 
   return (
-    <div className="grid items-start gap-6 lg:grid-cols-[minmax(0,3fr)_minmax(20rem,2fr)]">
+    <div className="grid items-start gap-6 lg:grid-cols-[minmax(0,11fr)_minmax(0,9fr)]">
       <div className="grid gap-3 lg:sticky lg:top-2">
         <PhotoBoard
           photo={photo}
@@ -95,8 +95,6 @@ export function StraightenPanel({ wall, photo, sheet, draft, onStraightened }: P
             ) : null}
           </Notice>
         ) : null}
-        {judged.state === 'fit' ? <WarpPreview photo={photo} plan={judged.plan} /> : null}
-        {report ? <FitFacts report={report} sharpness={photo.sharpness ?? null} /> : null}
         {straighten.isPending ? <ProgressBar label={progressWords[progress.data?.state ?? 'waiting']} share={progress.data && progress.data.state !== 'idle' ? progress.data.share : null} /> : null}
         {straighten.error ? <ErrorState error={straighten.error} onRetry={run} /> : null}
         <div className="flex flex-wrap items-center gap-3">
@@ -108,6 +106,8 @@ export function StraightenPanel({ wall, photo, sheet, draft, onStraightened }: P
             {judged.state === 'unfinished' ? judged.words : judged.state === 'fit' ? `Each pixel will show ${(1 / judged.plan.pxPerMm).toFixed(2)} mm of the wall.` : null}
           </p>
         </div>
+        {judged.state === 'fit' ? <WarpPreview photo={photo} plan={judged.plan} /> : null}
+        {report ? <FitFacts report={report} sharpness={photo.sharpness ?? null} /> : null}
       </div>
     </div>
   );

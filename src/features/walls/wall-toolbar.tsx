@@ -32,7 +32,7 @@ export function WallToolbar({ tools, straightened }: Props) {
     <div className="mb-3 grid gap-2">
       <div role="group" aria-label="Tools for drawing on the wall" className="flex flex-wrap gap-2">
         {offered.map((tool) => (
-          <Button key={tool} small aria-pressed={inHand === tool} className={inHand === tool ? 'border-chalk-700 bg-chalk-100' : undefined} onClick={() => tools.take(tool)}>
+          <Button key={tool} small aria-pressed={inHand === tool} className="aria-pressed:border-chalk-700 aria-pressed:bg-chalk-100 aria-pressed:text-chalk-700" onClick={() => tools.take(tool)}>
             {toolWords[tool]}
           </Button>
         ))}
