@@ -1,5 +1,5 @@
 import type Konva from 'konva';
-import { useCallback, useMemo } from 'react';
+import { type ReactNode, useCallback, useMemo } from 'react';
 import { Layer, Shape } from 'react-konva';
 import { placedAll, type Placement } from '../../../../../shared/geometry/polygon.ts';
 import { hangerDrawing, shadowDrawing, wallDrawing, type Primitive } from '../../../../../shared/layouts/drawing.ts';
@@ -11,21 +11,26 @@ import { useEditor } from '../state/editor-store.ts';
 import { draw, drawPicture, write } from './canvas-pen.ts';
 import { layerPlace } from './view.ts';
 
-/** Every layer draws in wall mm, y up, by one shape; hits are found on the bench, never on the canvas. */
-export function WallLayer({ paint }: { paint: (context: CanvasRenderingContext2D, pxPerMm: number) => void }) {
+/** A canvas in wall mm, y up. What changes at the same times shares one: the fewer canvases, the less there is to lay over one another at every move. */
+export function WallLayer({ children }: { children: ReactNode }) {
   const view = useEditor((e) => e.view);
-  const scene = useCallback((context: Konva.Context, shape: Konva.Shape) => paint(context._context, shape.getAbsoluteScale().x), [paint]);
   return (
     <Layer listening={false} {...layerPlace(view)}>
-      <Shape sceneFunc={scene} perfectDrawEnabled={false} />
+      {children}
     </Layer>
   );
+}
+
+/** One thing drawn on a wall layer; hits are found on the bench, never on the canvas. */
+export function WallShape({ paint }: { paint: (context: CanvasRenderingContext2D, pxPerMm: number) => void }) {
+  const scene = useCallback((context: Konva.Context, shape: Konva.Shape) => paint(context._context, shape.getAbsoluteScale().x), [paint]);
+  return <Shape sceneFunc={scene} perfectDrawEnabled={false} />;
 }
 
 type Elevation = NonNullable<NonNullable<Wall['photo']>['elevation']>;
 
 /** The wall's face and its photo: changes when a photo arrives. */
-export function GroundLayer({ wall, picture, image }: { wall: Wall; picture: Elevation | null; image: HTMLImageElement | null }) {
+export function GroundShape({ wall, picture, image }: { wall: Wall; picture: Elevation | null; image: HTMLImageElement | null }) {
   const ground = useMemo(() => wallDrawing(wall, null).ground, [wall]);
   const brightness = useEditor((e) => e.show.photo);
   const paint = useCallback(
@@ -41,11 +46,11 @@ export function GroundLayer({ wall, picture, image }: { wall: Wall; picture: Ele
     },
     [ground, picture, image, brightness],
   );
-  return <WallLayer paint={paint} />;
+  return <WallShape paint={paint} />;
 }
 
 /** Studs and obstructions: change when the wall is measured again. */
-export function SiteLayer({ wall }: { wall: Wall }) {
+export function SiteShape({ wall }: { wall: Wall }) {
   const drawn = useMemo(() => wallDrawing(wall, null), [wall]);
   const showStuds = useEditor((e) => e.show.studs);
   const paint = useCallback(
@@ -55,7 +60,7 @@ export function SiteLayer({ wall }: { wall: Wall }) {
     },
     [drawn, showStuds],
   );
-  return <WallLayer paint={paint} />;
+  return <WallShape paint={paint} />;
 }
 
 const shadows = new WeakMap<Placement, ReturnType<typeof shadowDrawing>>();
@@ -90,7 +95,7 @@ function paintShadow(context: CanvasRenderingContext2D, pattern: ReadyPattern, a
 const none: ReadonlySet<string> = new Set();
 
 /** The frames that stay: changes when the bench does, not while one is carried. */
-export function FramesLayer({ designs }: { designs: Designs }) {
+export function FramesShape({ designs }: { designs: Designs }) {
   const frames = useEditor((e) => e.bench.frames);
   const hangers = useEditor((e) => e.show.hangers);
   const heldKey = useEditor((e) => (e.hand ? [...e.hand.placements.keys()].join(' ') : ''));
@@ -107,7 +112,7 @@ export function FramesLayer({ designs }: { designs: Designs }) {
     },
     [frames, designs, hangers, heldKey],
   );
-  return <WallLayer paint={paint} />;
+  return <WallShape paint={paint} />;
 }
 
 function paintLabel(context: CanvasRenderingContext2D, frame: Frame, pxPerMm: number): void {
@@ -115,15 +120,16 @@ function paintLabel(context: CanvasRenderingContext2D, frame: Frame, pxPerMm: nu
 }
 
 /** What the hand holds: changes with every move of the pointer. */
-export function HandLayer({ designs }: { designs: Designs }) {
+export function HandShape({ designs }: { designs: Designs }) {
   const hand = useEditor((e) => e.hand);
   const frames = useEditor((e) => e.bench.frames);
   const hangers = useEditor((e) => e.show.hangers);
+  const byId = useMemo(() => new Map(frames.map((f) => [f.id, f])), [frames]);
   const paint = useCallback(
     (context: CanvasRenderingContext2D, pxPerMm: number) => {
       if (!hand) return;
       const held: [ReadyPattern | undefined, Placement, Slides | undefined][] = [...hand.placements].map(([id, at]) => {
-        const frame = frames.find((f) => f.id === id);
+        const frame = byId.get(id);
         return [designs.get(frame?.patternId ?? ''), at, frame?.hangerSlides];
       });
       if (hand.fromTray?.at) held.push([designs.get(hand.fromTray.patternId), hand.fromTray.at, undefined]);
@@ -133,7 +139,7 @@ export function HandLayer({ designs }: { designs: Designs }) {
         paintFrame(context, pattern, at, pxPerMm, hangers, slides);
       }
     },
-    [hand, frames, designs, hangers],
+    [hand, byId, designs, hangers],
   );
-  return <WallLayer paint={paint} />;
+  return <WallShape paint={paint} />;
 }

@@ -10,9 +10,9 @@ import { listenToPointer } from '../gestures/pointer.ts';
 import { type ShownFinding, weightOfFrames } from '../ledger/findings-ledger.tsx';
 import type { Designs } from '../state/designs.ts';
 import { useEditor, useEditorStore } from '../state/editor-store.ts';
-import { GuidesLayer } from './guides-layer.tsx';
-import { FramesLayer, GroundLayer, HandLayer, SiteLayer } from './layers.tsx';
-import { MarksLayer } from './marks-layer.tsx';
+import { GuidesShape } from './guides-shape.tsx';
+import { FramesShape, GroundShape, HandShape, SiteShape, WallLayer } from './layers.tsx';
+import { MarksShape } from './marks-shape.tsx';
 import { fitted } from './view.ts';
 
 interface Props {
@@ -87,12 +87,18 @@ export function LayoutStage({ wall, designs, findings, readOnly }: Props) {
     >
       {size.width > 0 ? (
         <Stage width={size.width} height={size.height} listening={false}>
-          <GroundLayer wall={wall} picture={picture} image={image} />
-          <SiteLayer wall={wall} />
-          <FramesLayer designs={designs} />
-          <MarksLayer designs={designs} marked={marked} />
-          <HandLayer designs={designs} />
-          <GuidesLayer designs={designs} wall={wall} readOnly={readOnly} lengthText={(mm) => formatLength(mm, units)} />
+          <WallLayer>
+            <GroundShape wall={wall} picture={picture} image={image} />
+            <SiteShape wall={wall} />
+          </WallLayer>
+          <WallLayer>
+            <FramesShape designs={designs} />
+            <MarksShape designs={designs} marked={marked} />
+          </WallLayer>
+          <WallLayer>
+            <HandShape designs={designs} />
+            <GuidesShape designs={designs} wall={wall} readOnly={readOnly} lengthText={(mm) => formatLength(mm, units)} />
+          </WallLayer>
         </Stage>
       ) : null}
     </div>

@@ -1,19 +1,17 @@
 import type Konva from 'konva';
-import { useCallback } from 'react';
-import { Layer, Shape } from 'react-konva';
+import { useCallback, useMemo } from 'react';
+import { Shape } from 'react-konva';
 import { placedAll, type Placement, type Polygon } from '../../../../../shared/geometry/polygon.ts';
 import { colours } from '../../../../../tailwind.config.ts';
 import { turnHandle } from '../gestures/carry.ts';
 import type { Designs } from '../state/designs.ts';
 import { useEditor } from '../state/editor-store.ts';
 import { paintGhost, paintMarquee, paintMeasure, paintSnap } from './paint-guides.ts';
-import { layerPlace } from './view.ts';
 
 const chalk = colours.chalk[600];
 
 /** What is chosen, the turn handle, the chalk lines of a snap, the box of a choice and the measure being taken. */
-export function GuidesLayer({ designs, wall, readOnly, lengthText }: { designs: Designs; wall: { widthMm: number; heightMm: number }; readOnly: boolean; lengthText: (mm: number) => string }) {
-  const view = useEditor((e) => e.view);
+export function GuidesShape({ designs, wall, readOnly, lengthText }: { designs: Designs; wall: { widthMm: number; heightMm: number }; readOnly: boolean; lengthText: (mm: number) => string }) {
   const hand = useEditor((e) => e.hand);
   const selected = useEditor((e) => e.selected);
   const frames = useEditor((e) => e.bench.frames);
@@ -21,29 +19,29 @@ export function GuidesLayer({ designs, wall, readOnly, lengthText }: { designs: 
   const measuring = useEditor((e) => e.measuring);
   const ghosts = useEditor((e) => e.ghosts);
   const reveal = useEditor((e) => e.bench.sheet.revealMm);
+  const chosen = useMemo(() => {
+    const ids = new Set(selected);
+    return frames.filter((f) => ids.has(f.id));
+  }, [selected, frames]);
   const scene = useCallback(
     ({ _context: context }: Konva.Context, shape: Konva.Shape) => {
       const px = 1 / shape.getAbsoluteScale().x;
-      for (const id of selected) {
-        const frame = frames.find((f) => f.id === id);
-        const pattern = frame && designs.get(frame.patternId);
-        if (!frame || !pattern) continue;
+      for (const frame of chosen) {
+        const { id } = frame;
+        const pattern = designs.get(frame.patternId);
+        if (!pattern) continue;
         const at: Placement = hand?.placements.get(id) ?? frame;
         strokeRing(context, placedAll(pattern.outline, at), px);
-        if (selected.length === 1 && !readOnly && !frame.locked) paintHandle(context, at, pattern.radiusMm, px);
+        if (chosen.length === 1 && !readOnly && !frame.locked) paintHandle(context, at, pattern.radiusMm, px);
       }
       for (const ghost of ghosts) paintGhost(context, ghost, px);
       if (hand) paintSnap(context, hand, { wall, px, reveal, lengthText });
       if (marquee) paintMarquee(context, marquee, px);
       if (measuring) paintMeasure(context, measuring, px, lengthText);
     },
-    [selected, frames, hand, ghosts, marquee, measuring, designs, readOnly, reveal, wall, lengthText],
+    [chosen, hand, ghosts, marquee, measuring, designs, readOnly, reveal, wall, lengthText],
   );
-  return (
-    <Layer listening={false} {...layerPlace(view)}>
-      <Shape sceneFunc={scene} perfectDrawEnabled={false} />
-    </Layer>
-  );
+  return <Shape sceneFunc={scene} perfectDrawEnabled={false} />;
 }
 
 function strokeRing(context: CanvasRenderingContext2D, ring: Polygon, px: number): void {

@@ -4,7 +4,7 @@ import { colours } from '../../../../../tailwind.config.ts';
 import { type FindingWeight, weightShapes } from '../../../../components/weight-mark.tsx';
 import type { Designs } from '../state/designs.ts';
 import { useEditor } from '../state/editor-store.ts';
-import { WallLayer } from './layers.tsx';
+import { WallShape } from './layers.tsx';
 
 const inks = { stop: colours.madder[600], caution: colours.ochre[600], note: colours.ink[500] };
 /** Size of a mark on screen, px, and how far over the middle of its frame it stands, clear of the label. */
@@ -21,7 +21,7 @@ const pathOf = (weight: FindingWeight): Path2D => {
 };
 
 /** Marks the frames that bear a stop or a caution, each by its shape: changes when the checks have run. */
-export function MarksLayer({ designs, marked }: { designs: Designs; marked: ReadonlyMap<string, FindingWeight> }) {
+export function MarksShape({ designs, marked }: { designs: Designs; marked: ReadonlyMap<string, FindingWeight> }) {
   const frames = useEditor((e) => e.bench.frames);
   const heldKey = useEditor((e) => (e.hand ? [...e.hand.placements.keys()].join(' ') : ''));
   const paint = useCallback(
@@ -36,7 +36,7 @@ export function MarksLayer({ designs, marked }: { designs: Designs; marked: Read
     },
     [frames, designs, marked, heldKey],
   );
-  return <WallLayer paint={paint} />;
+  return <WallShape paint={paint} />;
 }
 
 function paintMark(context: CanvasRenderingContext2D, weight: FindingWeight, at: Pick<Placement, 'xMm' | 'yMm'>, pxPerMm: number, radiusPx: number): void {
