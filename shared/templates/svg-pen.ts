@@ -1,4 +1,5 @@
 import type { Colour, Page, Primitive, Stroke, Text } from './drawing.ts';
+import { estimateWidth } from './text-fitting.ts';
 
 /** Colours of the theme, as the sheets print them. */
 export const svgInks: Record<Colour, string> = {
@@ -58,10 +59,13 @@ class SvgPen {
     return [`<path d="${path}${item.closed ? 'Z' : ''}"${look(item.stroke, item.fill)}/>`];
   }
 
-  private words({ at, text, sizeMm, anchor, turnRad, colour, weight }: Text): string[] {
+  private words({ at, text, sizeMm, anchor, turnRad, colour, weight, maxWidthMm }: Text): string[] {
     const turn = turnRad === 0 ? '' : ` transform="rotate(${n((-turnRad * 180) / Math.PI)} ${n(at.x)} ${n(this.heightMm - at.y)})"`;
     const place = `x="${n(at.x)}" y="${n(this.heightMm - at.y)}" font-size="${n(sizeMm)}"`;
-    return [`<text ${place}${anchor === 'start' ? '' : ` text-anchor="${anchor}"`}${weight === 'bold' ? ' font-weight="700"' : ''} fill="${svgInks[colour]}"${turn}>${escaped(text)}</text>`];
+    // Readers without the type set another, often wider; what must fit is held to the width it has in print.
+    const width = maxWidthMm === undefined ? 0 : Math.min(estimateWidth(text, sizeMm, weight), maxWidthMm);
+    const held = maxWidthMm !== undefined && width > 0.8 * maxWidthMm ? ` textLength="${n(width)}" lengthAdjust="spacingAndGlyphs"` : '';
+    return [`<text ${place}${held}${anchor === 'start' ? '' : ` text-anchor="${anchor}"`}${weight === 'bold' ? ' font-weight="700"' : ''} fill="${svgInks[colour]}"${turn}>${escaped(text)}</text>`];
   }
 }
 
