@@ -59,10 +59,10 @@ export function MarkPositions({ marks, photo, offBy, onChange }: Props) {
               <Th scope="row">
                 {i + 1} <span className="block text-sm font-normal text-ink-700">{points ? cornerNames[i] : null}</span>
               </Th>
-              <Td className="min-w-24">
+              <Td className="min-w-28">
                 <LengthField className="[&>label]:sr-only" label={`Mark ${i + 1} from the left`} value={mark.xMm} onChange={(xMm) => setMark(i, { xMm }, 'x')} />
               </Td>
-              <Td className="min-w-24">
+              <Td className="min-w-28">
                 <LengthField className="[&>label]:sr-only" label={`Mark ${i + 1} above the floor`} value={mark.yMm} onChange={(yMm) => setMark(i, { yMm }, 'y')} />
               </Td>
               <Td figure className="whitespace-nowrap">

@@ -5,7 +5,6 @@ import { ErrorState } from '../../components/error-state.tsx';
 import { Notice } from '../../components/notice.tsx';
 import { ProgressBar } from '../../components/progress-bar.tsx';
 import { SelectField } from '../../components/select-field.tsx';
-import { useUnits } from '../../lib/units.ts';
 import { errorWords } from './error-words.ts';
 import { FitFacts } from './fit-facts.tsx';
 import { MarkPositions } from './mark-positions.tsx';
@@ -31,12 +30,12 @@ interface Props {
 
 /** What is known of the photo: marks, lines, lengths and straight edges; what that is worth; and the straightening. */
 export function StraightenPanel({ wall, photo, sheet, draft, onStraightened }: Props) {
-  const units = useUnits();
   const straighten = useStraighten(wall, photo.id);
   const progress = useStraighteningProgress(wall.id, photo.id, straighten.isPending);
   const calledOff = useRef<AbortController | null>(null);
   const { judged, report, residualsMm } = useJudged(draft, photo, wall);
-  const offBy = residualsMm?.map((mm) => errorWords(mm, units)) ?? [];
+  // Always in millimetres: beside a mark there is no room for both.
+  const offBy = residualsMm?.map((mm) => errorWords(mm, 'mm')) ?? [];
   const change = (next: PhotoDraft, words: string, run?: string) => sheet.change(next, { words, run });
   const run = () => {
     if (judged.state !== 'fit') return;

@@ -47,7 +47,7 @@ export function WallLegend({ unconfirmed }: { unconfirmed: boolean }) {
   return (
     <figcaption className="mt-2 text-sm text-ink-700">
       Grid lines every {formatLength(stepMm[units], units)} from the left end and the floor. Dashed pairs are studs
-      {unconfirmed ? <>; <span className="font-bold text-chalk-700">?</span> marks one that nobody has confirmed yet</> : null}. Hatching is what stands in the way.
+      {unconfirmed ? <>; <span className="font-bold text-chalk-700">?</span> marks one that nobody has confirmed yet</> : null}. Hatching is what stands in the way; the dotted line about it is what frames keep clear of.
     </figcaption>
   );
 }

@@ -1,8 +1,9 @@
+import { boundsOf } from '../../../shared/walls/studs.ts';
 import type { Wall } from '../../../shared/walls/wall.ts';
 import { zoneWords } from './wall-words.ts';
 
 /** What only the measure shows on the wall: floor and ceiling, where people walk, sit or lie, and how far frames keep clear. mm, y turned down. */
-export function WallMarks({ wall }: { wall: Pick<Wall, 'widthMm' | 'heightMm' | 'zones' | 'outlineMm'> }) {
+export function WallMarks({ wall }: { wall: Pick<Wall, 'widthMm' | 'heightMm' | 'zones' | 'outlineMm' | 'obstructions'> }) {
   const size = Math.max(wall.widthMm, wall.heightMm) * 0.016;
   const words = { fontSize: size, strokeWidth: size / 4, className: 'fill-ink-900 stroke-white [paint-order:stroke] max-sm:hidden' };
   return (
@@ -19,6 +20,14 @@ export function WallMarks({ wall }: { wall: Pick<Wall, 'widthMm' | 'heightMm' | 
           </text>
         </>
       )}
+      {wall.obstructions.map((o) => {
+        const { leftMm, bottomMm, widthMm, heightMm } = boundsOf(o.outlineMm);
+        if (o.outlineMm.length !== 4 || o.clearanceMm <= 0) return null;
+        const by = o.clearanceMm;
+        return (
+          <rect key={o.id} x={leftMm - by} y={-(bottomMm + heightMm + by)} width={widthMm + 2 * by} height={heightMm + 2 * by} rx={by} className="fill-none stroke-ink-500" strokeWidth="1" strokeDasharray="2 3" vectorEffect="non-scaling-stroke" />
+        );
+      })}
       {wall.zones.map((zone) => {
         const high = size * 2.2;
         return (
