@@ -38,7 +38,7 @@ export function crossHair(at: Point, scale = 1): Primitive[] {
   ];
 }
 
-export function studs(input: TemplateInput, { live, window, toPage }: View): Primitive[] {
+export function studs(input: TemplateInput, { live, window, toPage, seen }: View): Primitive[] {
   const top = live.y + live.height;
   return input.wall.studs.flatMap((stud): Primitive[] => {
     const left = toPage({ x: stud.xMm - stud.widthMm / 2, y: 0 }).x;
@@ -50,7 +50,8 @@ export function studs(input: TemplateInput, { live, window, toPage }: View): Pri
     const items: Primitive[] = [
       line('studs', { x: left, y: live.y }, { x: left, y: top }, studEdge),
       line('studs', { x: right, y: live.y }, { x: right, y: top }, studEdge),
-      text('studs', { x: middle + 0.9, y: live.y + 20 }, words, 2.5, { ...upright, colour: 'chalk', maxWidthMm: live.height - 30 }),
+      // At the edge words would be cut in two, or lie under the next sheet, which says them itself.
+      ...(middle > live.x + 3 && middle < live.x + seen.width - 8 ? [text('studs', { x: middle + 0.9, y: live.y + 20 }, words, 2.5, { ...upright, colour: 'chalk', maxWidthMm: live.height - 30 })] : []),
     ];
     if (stud.confirmed) return items;
     const every = 60;
