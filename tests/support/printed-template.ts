@@ -31,7 +31,7 @@ export async function readSheets(pdf: string, correction = { x: 1, y: 1 }): Prom
   for (let page = 1; page <= pages; page += 1) {
     const printed = await PrintedPage.read(pdf, page);
     const bars = (['across', 'up'] as const).map((axis) => {
-      const stated = new RegExp(`This bar is ${length} ${axis}`).exec(printed.words);
+      const stated = new RegExp(`is ${length} ${axis}\\b`).exec(printed.words);
       return { axis, statedMm: read(stated![1]!), printedMm: printed.barLength(axis) };
     });
     const fromLeft = new RegExp(`this edge is ${length} from the wall’s left edge`).exec(printed.words);
