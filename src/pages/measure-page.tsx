@@ -110,7 +110,7 @@ function Measure({ wall }: { wall: Wall }) {
           </div>
         ) : null}
         {view === 'marks' && wall.photo && photoSheet.draft ? (
-          <StraightenPanel key={wall.photo.id} wall={shown} photo={wall.photo} sheet={photoSheet} draft={photoSheet.draft} onStraightened={() => setView('wall')} />
+          <StraightenPanel key={wall.photo.id} wall={wall} photo={wall.photo} sheet={photoSheet} draft={photoSheet.draft} onStraightened={() => setView('wall')} />
         ) : null}
         {view === 'wall' ? (
           <WallView wall={shown} photo={wall.photo} tools={mayChange ? tools : null} unconfirmed={open > 0}>
