@@ -1,6 +1,7 @@
 import type { Wall } from '../../../../shared/walls/wall.ts';
 import { classNames } from '../../../components/class-names.ts';
 import { Notice } from '../../../components/notice.tsx';
+import { ArrangeDialog } from './arrange/arrange-dialog.tsx';
 import { ConflictNotice } from './ledger/conflict-notice.tsx';
 import { FindingsLedger } from './ledger/findings-ledger.tsx';
 import { FrameSheet } from './ledger/frame-sheet.tsx';
@@ -29,6 +30,7 @@ interface Props {
 export function LayoutEditor({ wall, designs, checks, readOnly, narrow }: Props) {
   const save = useEditor((e) => e.save);
   const seeking = useEditor((e) => e.seeking);
+  const arranging = useEditor((e) => e.arranging);
   const findings = checks?.findings ?? null;
   return (
     <div className="flex flex-col gap-3 lg:min-h-0 lg:grow lg:flex-row">
@@ -59,6 +61,7 @@ export function LayoutEditor({ wall, designs, checks, readOnly, narrow }: Props)
         <FramesTable designs={designs} />
         <WholeSizes designs={designs} wall={wall} readOnly={readOnly} />
       </aside>
+      {arranging && !readOnly ? <ArrangeDialog wall={wall} designs={designs} checks={checks} /> : null}
     </div>
   );
 }

@@ -57,6 +57,11 @@ export function StageToolbar({ wall, designs, readOnly }: { wall: Wall; designs:
           Seek studs
         </Button>
       )}
+      {readOnly ? null : (
+        <Button small aria-haspopup="dialog" onClick={() => store.setState({ arranging: true })}>
+          Arrange for me
+        </Button>
+      )}
       <Tick label="Studs" checked={show.studs} onChange={(studs) => store.setState({ show: { ...show, studs } })} />
       <Tick label="Hangers" checked={show.hangers} onChange={(hangers) => store.setState({ show: { ...show, hangers } })} />
       {wall.photo?.elevation ? <PhotoBrightness /> : null}

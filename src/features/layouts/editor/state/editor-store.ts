@@ -53,6 +53,8 @@ export interface Editor extends EditorState {
   /** Whether studs are being sought, and how the frames would stand by what is chosen there. */
   seeking: boolean;
   ghosts: readonly Ghost[];
+  /** Whether the dialog that arranges frames is open. */
+  arranging: boolean;
   /** Whether a held frame snaps to its neighbours. */
   snapping: boolean;
   /** Where the wall is drawn; gestures that begin elsewhere find it here. */
@@ -79,6 +81,7 @@ export function createEditorStore(layout: Layout): EditorStore {
     measuring: null,
     seeking: false,
     ghosts: [],
+    arranging: false,
     snapping: true,
     stage: null,
   }));
