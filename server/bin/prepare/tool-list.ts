@@ -29,11 +29,12 @@ export const browserTools: ToolGroup = {
 export const pdfTools: ToolGroup = {
   name: 'pdf',
   purpose: 'the readers that printed sheets are checked with',
-  packages: ['poppler-utils', 'qpdf'],
+  packages: ['poppler-utils', 'qpdf', 'mupdf-tools'],
   programs: [
     { name: 'pdftoppm', versionArgs: ['-v'] },
     { name: 'pdfinfo', versionArgs: ['-v'] },
     { name: 'pdftotext', versionArgs: ['-v'] },
     { name: 'qpdf', versionArgs: ['--version'] },
+    { name: 'mutool', versionArgs: ['-v'] },
   ],
 };

@@ -22,12 +22,10 @@ async function print(name: string, change: Partial<TemplateInput>): Promise<stri
   return file;
 }
 
-/** What an engine other than poppler says while it reads every page; nothing where it is content. */
+/** What MuPDF, an engine other than poppler, says while it draws every page; nothing where it is content. */
 function warnings(file: string): string {
-  const engine = ['mutool', 'gs'].find((name) => spawnSync(name, name === 'gs' ? ['-v'] : ['-v'], { encoding: 'utf8' }).error === undefined);
-  if (!engine) return '';
-  const args = engine === 'gs' ? ['-q', '-dNOPAUSE', '-dBATCH', '-sDEVICE=nullpage', file] : ['draw', '-q', '-r', '20', '-o', path.join(folder, 'out.png'), file];
-  const { stdout, stderr } = spawnSync(engine, args, { encoding: 'utf8' });
+  const { stdout, stderr, status, error } = spawnSync('mutool', ['draw', '-q', '-r', '20', '-o', path.join(folder, 'out.png'), file], { encoding: 'utf8' });
+  if (error || status !== 0) throw new Error(`mutool could not draw the file: ${error?.message ?? stderr}`);
   return `${stdout}${stderr}`.split('\n').filter((row) => row !== '' && !/ICC support is not available/.test(row)).join('\n');
 }
 
