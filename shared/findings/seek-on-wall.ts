@@ -6,6 +6,7 @@ import { sameFrame } from '../layouts/edits.ts';
 import type { Edit, Frame } from '../layouts/layout.ts';
 import type { PlacedHanger } from '../patterns/hangers.ts';
 import { formatLength } from '../units/length.ts';
+import { pastFace } from '../walls/wall-face.ts';
 import { hasStuds, usualDiameterMm } from './hung-body.ts';
 import { hangerKey, type PlacedFrame } from './placed-frame.ts';
 import type { Surroundings } from './scene.ts';
@@ -43,7 +44,8 @@ export function seekOnWall(frames: readonly PlacedFrame[], around: Surroundings)
   const hangers = frames.flatMap((placed) => placed.hangers.map((hanger, i) => seekHanger(placed, hanger, i, around)));
   const zones = wall.studs.map((s) => ({ studId: s.id, xMm: s.xMm, halfMm: s.widthMm / 2 - s.uncertaintyMm }));
   const outlines = frames.map((f): WallOutline => f.outline.map(({ x, y }) => [x, y] as const));
-  const free = allowedShifts(outlines, wall.widthMm, wall.obstructions);
+  const past = pastFace(wall).map((outlineMm) => ({ outlineMm, clearanceMm: 0 }));
+  const free = allowedShifts(outlines, wall.widthMm, [...wall.obstructions, ...past]);
   const locked = frames.filter((f) => f.frame.locked);
   const allowed: SeekInput['allowed'] = locked.length > 0 ? [[0, 0]] : free;
   const input: SeekInput = { hangers, zones, allowed, lengthText: (mm) => formatLength(mm, limits.units) };

@@ -1,3 +1,4 @@
+import polygonClipping from 'polygon-clipping';
 import type { WallShape } from './wall.ts';
 
 interface Corner { x: number; y: number }
@@ -18,4 +19,19 @@ export function faceTopAt(wall: Pick<WallShape, 'widthMm' | 'heightMm' | 'outlin
     return t >= 0 && t <= 1 ? [a.y + t * (b.y - a.y)] : [];
   });
   return met.length > 0 ? Math.max(...met) : wall.heightMm;
+}
+
+/**
+ * What of the wall's width and height lies past its outline, mm: simple polygons, none where the wall is a rectangle. The rectangle is
+ * halved through the outline first, so that what is left round it is never a ring with a hole.
+ */
+export function pastFace(wall: Pick<WallShape, 'widthMm' | 'heightMm' | 'outlineMm'>): [number, number][][] {
+  if (!wall.outlineMm) return [];
+  const xs = wall.outlineMm.map(([x]) => x);
+  const cut = (Math.min(...xs) + Math.max(...xs)) / 2;
+  const half = (from: number, to: number): [number, number][] => [[from, 0], [to, 0], [to, wall.heightMm], [from, wall.heightMm]];
+  const halves = [half(0, cut), half(cut, wall.widthMm)];
+  const rest = halves.flatMap((rectangle) => polygonClipping.difference([rectangle], [wall.outlineMm as [number, number][]]));
+  // The library closes its rings by the first corner once more.
+  return rest.flatMap(([ring]) => (ring ? [ring.slice(0, -1)] : []));
 }
