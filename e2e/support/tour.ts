@@ -8,7 +8,7 @@ import { chromium, type Page } from '@playwright/test';
 const base = process.argv[2] ?? 'http://127.0.0.1:4310';
 const folder = path.resolve(import.meta.dirname, '../tour');
 const browser = await chromium.launch({ executablePath: process.env.COMBWRIGHT_CHROMIUM ?? '/usr/bin/chromium', args: ['--no-sandbox', '--disable-gpu'] });
-const page = await (await browser.newContext({ viewport: { width: 1280, height: 800 } })).newPage();
+const page = await (await browser.newContext({ viewport: { width: 1440, height: 900 } })).newPage();
 const shot = async (of: Page, name: string) => {
   await of.waitForTimeout(2500);
   await of.screenshot({ path: path.join(folder, `${name}.jpg`), type: 'jpeg', quality: 82 });
@@ -37,6 +37,6 @@ await shot(phone, 'portal');
 
 const pdf = path.join(mkdtempSync(path.join(os.tmpdir(), 'tour-')), 'template.pdf');
 writeFileSync(pdf, await (await page.request.get(`${base}/api/layouts/${layout!.id}/template.pdf?paper=letter`)).body());
-execFileSync('pdftoppm', ['-jpeg', '-r', '70', '-f', '4', '-l', '4', '-singlefile', pdf, pdf]);
+execFileSync('pdftoppm', ['-jpeg', '-r', '70', '-f', '11', '-l', '11', '-singlefile', pdf, pdf]);
 copyFileSync(`${pdf}.jpg`, path.join(folder, 'template.jpg'));
 await browser.close();

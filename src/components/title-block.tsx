@@ -38,7 +38,7 @@ export function TitleBlock({ title, above, cells = [], action }: Props) {
         </dl>
       ) : null}
       {action ? (
-        <div className="flex grow items-center bg-white px-4 py-2 max-md:basis-full md:grow-0 [&>*]:max-md:w-full">{action}</div>
+        <div className="flex grow items-center bg-white px-4 py-2 max-md:basis-full md:justify-end [&>*]:max-md:w-full">{action}</div>
       ) : null}
     </div>
   );
