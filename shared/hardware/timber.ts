@@ -105,7 +105,7 @@ const assigned: Partial<Record<SpeciesId, [value: number, row: string]>> = {
 
 /**
  * The G that screws in this species are reckoned with: as assigned by the NDS where its table has the species (table 12.3.3A of NDS-2018,
- * read in a transcription), else the Wood Handbook's value brought to oven-dry volume.
+ * read in a secondary copy), else the Wood Handbook's value brought to oven-dry volume.
  */
 export function connectionGravity(species: string): { value: number; source: string } {
   const row = timberOf(species);
