@@ -28,8 +28,8 @@ export function FitFacts({ report, sharpness }: { report: FitReport; sharpness: 
         {lens.state === 'fitted'
           ? `${lensWords(lens.lambda)} Told to ±${lens.spreadPercent.toFixed(2)} %.`
           : lens.why === 'too unsure'
-            ? 'The lens could not be told surely from this, and is taken for straight; the error above allows for that.'
-            : 'The lens is taken for straight, since nothing marked tells of it; the error above allows for that. A straight edge or a fifth mark tells it.'}
+            ? 'The lens could not be told surely from this, and is taken for straight. The error above allows for a lens as phones usually have; a wide-angle lens can bend far more.'
+            : 'The lens is taken for straight, since nothing marked tells of it. The error above allows for a lens as phones usually have; a wide-angle lens can bend far more. Mark a straight edge or a fifth point, or check a length, to be sure.'}
       </p>
       {contradiction ? (
         <Notice kind="stop" live>
