@@ -14,9 +14,10 @@ export function peopleRoutes(mount: Mount, people: PeopleService, cookies: Sessi
 
   mount.on(peopleApi.register, async ({ body, req, res }) => welcome(res, await people.register(body, device(req))));
   mount.on(peopleApi.signIn, async ({ body, req, res }) => {
-    // Whatever session the browser held before ends here: a sign-in never continues another's.
+    const signedIn = await people.signIn(body.email, body.password, device(req));
+    // Whatever session the browser held before ends here, and only now: a sign-in never continues another's, a mistyped password ends none.
     await people.signOut(cookies.refreshToken(req));
-    return welcome(res, await people.signIn(body.email, body.password, device(req)));
+    return welcome(res, signedIn);
   });
   mount.on(peopleApi.refresh, async ({ req, res }) => {
     const token = cookies.refreshToken(req);

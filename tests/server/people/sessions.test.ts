@@ -72,6 +72,12 @@ describe('a session', () => {
     await aBrowser(app).get('/api/people/me').set('Cookie', kept).expect(401);
   });
 
+  it('outlives a mistyped password', async () => {
+    const { browser, email } = await aShop(app);
+    await browser.post('/api/people/sign-in').send({ email, password: 'not the password' }).expect(401);
+    await browser.get('/api/people/me').expect(200);
+  });
+
   it('is not believed when its token is unsigned, or signed by another hand', async () => {
     const forged = `${Buffer.from('{"alg":"none","typ":"at+jwt"}').toString('base64url')}.${Buffer.from('{"sub":"x"}').toString('base64url')}.`;
     await aBrowser(app).get('/api/people/me').set('Cookie', `cw_access=${forged}`).expect(401);
