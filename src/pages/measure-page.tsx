@@ -27,7 +27,7 @@ import { drawable } from '../features/walls/wall-draft.ts';
 import { WallFacts } from '../features/walls/wall-facts.tsx';
 import { UndoButtons } from '../features/walls/wall-toolbar.tsx';
 import { WallView } from '../features/walls/wall-view.tsx';
-import { constructionWords } from '../features/walls/wall-words.ts';
+import { constructionWords } from '../../shared/walls/construction.ts';
 import { useRemovePhoto, wallQuery } from '../features/walls/walls.queries.ts';
 import { ZoneFields } from '../features/walls/zone-fields.tsx';
 import { keys } from '../lib/keys.ts';

@@ -1,5 +1,6 @@
 import { Controller, useWatch } from 'react-hook-form';
-import { studSpecies, usualStudSpecies } from '../../../shared/hardware/stud-species.ts';
+import { usualStudSpecies } from '../../../shared/hardware/stud-species.ts';
+import { constructionWords, holdsInWood, studSpeciesOptions } from '../../../shared/walls/construction.ts';
 import { constructions, type Wall, WallShape } from '../../../shared/walls/wall.ts';
 import { Button } from '../../components/button.tsx';
 import { FormDialog } from '../../components/form-dialog.tsx';
@@ -9,18 +10,6 @@ import { TextField } from '../../components/text-field.tsx';
 import { useSheetForm } from '../../lib/sheet-form.ts';
 import { useUnits } from '../../lib/units.ts';
 import { useAddWall } from './job-parts.queries.ts';
-
-export const constructionWords: Record<(typeof constructions)[number], string> = {
-  'wood studs': 'Wood studs',
-  'steel studs': 'Steel studs',
-  'plaster on lath': 'Plaster on lath',
-  masonry: 'Masonry',
-  'solid wood': 'Solid wood',
-};
-
-const speciesOptions = Object.entries(studSpecies).map(([value, gravity]) => ({ value, words: `${value.charAt(0).toUpperCase()}${value.slice(1)} (${gravity.toFixed(2)})` }));
-/** Where screws hold in wood, its species counts. */
-const inWood: readonly WallShape['construction'][] = ['wood studs', 'plaster on lath', 'solid wood'];
 
 /** Usual board thicknesses (common practice), in the units they are sold in. */
 const coverings = {
@@ -65,8 +54,8 @@ export function NewWallDialog({ jobId, onClose, onAdded }: { jobId: string; onCl
         {length('heightMm', 'Height', 'Finished floor to ceiling.')}
       </div>
       <SelectField label="Construction" options={constructions.map((c) => ({ value: c, words: constructionWords[c] }))} error={errors.construction?.message} {...register('construction')} />
-      {inWood.includes(construction) ? (
-        <SelectField label="Wood of the studs" hint="Species group and its specific gravity by NDS-2018. In doubt take a lower one." options={speciesOptions} error={errors.studSpecies?.message} {...register('studSpecies')} />
+      {holdsInWood(construction) ? (
+        <SelectField label="Wood of the studs" hint="Species group and its specific gravity by NDS-2018. In doubt take a lower one." options={studSpeciesOptions} error={errors.studSpecies?.message} {...register('studSpecies')} />
       ) : null}
       <div>
         {length('coveringMm', 'Covering', 'What lies between the bracket and the stud.')}

@@ -3,7 +3,7 @@ import { isConfirmed, type Wall } from '../../../shared/walls/wall.ts';
 import { LengthText } from '../../components/length-text.tsx';
 import { Slip, Slips } from '../../components/slip.tsx';
 import { paths } from '../../lib/paths.ts';
-import { constructionWords } from './new-wall-dialog.tsx';
+import { constructionWords } from '../../../shared/walls/construction.ts';
 
 /** The walls of a job, each with its drawing. */
 export function WallSlips({ walls, draw }: { walls: readonly Wall[]; draw: (wall: Wall) => ReactNode }) {

@@ -2,7 +2,8 @@ import { LengthField } from '../../components/length-field.tsx';
 import { SelectField } from '../../components/select-field.tsx';
 import { TextField } from '../../components/text-field.tsx';
 import type { DraftErrors, WallDraft } from './wall-draft.ts';
-import { constructionWords, holdsInWood, optionsOf, studSpeciesOptions } from './wall-words.ts';
+import { constructionWords, holdsInWood, studSpeciesOptions } from '../../../shared/walls/construction.ts';
+import { optionsOf } from './wall-words.ts';
 
 interface Props {
   draft: WallDraft;

@@ -1,20 +1,6 @@
-import { studSpecies } from '../../../shared/hardware/stud-species.ts';
 import type { Progress } from '../../../shared/walls/photo.ts';
-import type { constructions, obstructionKinds, WallShape, waysFound, Zone } from '../../../shared/walls/wall.ts';
+import type { obstructionKinds, waysFound, Zone } from '../../../shared/walls/wall.ts';
 import type { Way } from './photo-draft.ts';
-
-export const constructionWords: Record<(typeof constructions)[number], string> = {
-  'wood studs': 'Wood studs',
-  'steel studs': 'Steel studs',
-  'plaster on lath': 'Plaster on lath',
-  masonry: 'Masonry',
-  'solid wood': 'Solid wood',
-};
-
-/** Whether screws can hold in this wall's wood, so that its species counts. */
-export const holdsInWood = (construction: WallShape['construction']): boolean => construction === 'wood studs' || construction === 'plaster on lath' || construction === 'solid wood';
-
-export const studSpeciesOptions = Object.entries(studSpecies).map(([value, gravity]) => ({ value, words: `${value.charAt(0).toUpperCase()}${value.slice(1)} (${gravity.toFixed(2)})` }));
 
 export const foundByWords: Record<(typeof waysFound)[number], string> = {
   spacing: 'By spacing only',
